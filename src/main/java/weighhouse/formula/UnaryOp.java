@@ -1,0 +1,26 @@
+package weighhouse.formula;
+
+/** Operators on one operand. */
+public enum UnaryOp {
+  PLUS("+", true),
+  MINUS("-", true),
+  /** Implicit intersection. */
+  AT("@", true),
+  PERCENT("%", false);
+
+  private final String symbol;
+  private final boolean prefix;
+
+  UnaryOp(String symbol, boolean prefix) {
+    this.symbol = symbol;
+    this.prefix = prefix;
+  }
+
+  public String symbol() {
+    return symbol;
+  }
+
+  public boolean prefix() {
+    return prefix;
+  }
+}

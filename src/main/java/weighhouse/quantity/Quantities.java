@@ -1,0 +1,27 @@
+package weighhouse.quantity;
+
+import java.util.List;
+import weighhouse.formula.Expr;
+import weighhouse.workbook.CellAddress;
+import weighhouse.workbook.CellRange;
+
+/** What every number of a workbook means, as far as labels and algebra tell. */
+public interface Quantities {
+  /** The quantity of a cell; {@link Quantity#UNKNOWN} where nothing tells. */
+  Quantity at(CellAddress cell);
+
+  /** The quantity with its evidence. */
+  Inferred inferred(CellAddress cell);
+
+  /** The quantity of an expression that stands in the host cell. */
+  Quantity of(Expr expression, CellAddress host);
+
+  /** A short label for people, from the cells around it or its name; never null, may be empty. */
+  String label(CellAddress cell);
+
+  /** All cells with a known quantity, as ranges of one quantity. */
+  List<CellRange> ranges();
+
+  /** The model's cycle. */
+  Cycle cycle();
+}
