@@ -20,6 +20,6 @@ public record Change(Map<CellAddress, Value> values, Map<CellRange, Expr> formul
 
   /** A change of one input. */
   public static Change of(CellAddress cell, double number) {
-    return new Change(Map.of(cell, new Value.Number(number)), Map.of());
+    return new Change(Map.of(cell, new Value.Num(number)), Map.of());
   }
 }

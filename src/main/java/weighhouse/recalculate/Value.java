@@ -2,7 +2,7 @@ package weighhouse.recalculate;
 
 /** The value of a cell or of a part of a formula. */
 public sealed interface Value {
-  record Number(double value) implements Value {}
+  record Num(double value) implements Value {}
 
   record Text(String value) implements Value {}
 
@@ -14,11 +14,12 @@ public sealed interface Value {
   record Blank() implements Value {}
 
   /** A rectangle of values, rows first; none of them an array. */
+  @SuppressWarnings("ArrayRecordComponent") // compared nowhere; a list would double the memory
   record Array(Value[][] rows) implements Value {}
 
   /** The number that arithmetic sees: blank 0, TRUE 1; NaN for text, errors and arrays. */
   default double number() {
-    if (this instanceof Number n) {
+    if (this instanceof Num n) {
       return n.value();
     }
     if (this instanceof Logical l) {
