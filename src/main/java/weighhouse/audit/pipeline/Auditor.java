@@ -1,8 +1,10 @@
-package weighhouse.audit;
+package weighhouse.audit.pipeline;
 
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import weighhouse.audit.AuditOptions;
+import weighhouse.audit.AuditResult;
 import weighhouse.workbook.UnreadableWorkbookException;
 
 /**
