@@ -1,6 +1,7 @@
 package weighhouse.quantity;
 
 import java.util.List;
+import java.util.Optional;
 import weighhouse.formula.Expr;
 import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.CellRange;
@@ -24,4 +25,13 @@ public interface Quantities {
 
   /** The model's cycle. */
   Cycle cycle();
+
+  /** The model's results, most telling first. */
+  List<Outcome> outcomes();
+
+  /** The cell with the willingness-to-pay threshold, if the workbook tells one. */
+  Optional<CellAddress> threshold();
+
+  /** Whether independent signals say that this workbook is a health-economic model at all. */
+  boolean healthEconomic();
 }
