@@ -34,4 +34,13 @@ public enum BinaryOp {
   public int binding() {
     return binding;
   }
+
+  static BinaryOp of(String symbol) {
+    for (BinaryOp op : values()) {
+      if (op.symbol.equals(symbol)) {
+        return op;
+      }
+    }
+    throw new IllegalArgumentException(symbol);
+  }
 }

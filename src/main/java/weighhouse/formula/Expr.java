@@ -72,6 +72,9 @@ public sealed interface Expr {
 
   /** A function call; the name in upper case without vendor prefixes such as {@code _xlfn.}. */
   record Call(String function, List<Expr> arguments) implements Expr {
+    /** The name of a call whose first argument is what is called, as in LAMBDA(x,x+1)(5). */
+    public static final String APPLY = "";
+
     public Call {
       arguments = List.copyOf(arguments);
     }

@@ -23,4 +23,13 @@ public enum UnaryOp {
   public boolean prefix() {
     return prefix;
   }
+
+  static UnaryOp of(String symbol) {
+    for (UnaryOp op : values()) {
+      if (op.symbol.equals(symbol)) {
+        return op;
+      }
+    }
+    throw new IllegalArgumentException(symbol);
+  }
 }
