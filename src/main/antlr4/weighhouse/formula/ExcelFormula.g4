@@ -64,7 +64,7 @@ STRING : '"' (~'"' | '""')* '"' ;
 
 BOOLEAN : [Tt] [Rr] [Uu] [Ee] | [Ff] [Aa] [Ll] [Ss] [Ee] ;
 
-ERROR : '#' [A-Za-z] [A-Za-z0-9_/]* [!?] | '#' [Nn] '/' [Aa] | '#' [Gg] [Ee] [Tt] [A-Za-z_]+ ;
+ERROR : '#' [A-Za-z_]+ [!?] | '#' [Dd] [Ii] [Vv] '/0!' | '#' [Nn] '/' [Aa] | '#' [Gg] [Ee] [Tt] [A-Za-z_]+ ;
 
 // The last form is a dollar sign, the sheet, and a dot, as other programs write it.
 SHEET

@@ -159,7 +159,7 @@ public final class FormulaPrinter {
       return false;
     }
     Expr end = binary.left();
-    while (end instanceof Expr.Binary inner) {
+    while (end instanceof Expr.Binary inner && inner.op() == BinaryOp.INTERSECTION) {
       end = inner.right();
     }
     return end instanceof Expr.NameRef && opensWithParenthesis(binary);

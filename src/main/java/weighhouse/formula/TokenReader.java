@@ -53,8 +53,7 @@ final class TokenReader {
       if (token.getType() != SPACE) {
         kept.add(token);
       } else if (endsReference(tokens, i - 1) && startsReference(tokens, i + 1)) {
-        boolean spacedCall =
-            tokens.get(i - 1).getType() == NAME && tokens.get(i + 1).getText().equals("(");
+        boolean spacedCall = isCalled(tokens, i - 1) && tokens.get(i + 1).getText().equals("(");
         if (!spacedCall) {
           ((WritableToken) token).setType(INTERSECT);
           kept.add(token);
@@ -62,6 +61,12 @@ final class TokenReader {
       }
     }
     return kept;
+  }
+
+  /** A name before a parenthesis is a function, unless it is a column as in {@code $A:A (B1)}. */
+  private static boolean isCalled(List<Token> tokens, int i) {
+    boolean endOfRange = i > 0 && tokens.get(i - 1).getText().equals(":");
+    return tokens.get(i).getType() == NAME && !endOfRange;
   }
 
   private static boolean endsReference(List<Token> tokens, int i) {

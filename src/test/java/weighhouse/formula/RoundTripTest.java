@@ -1,6 +1,7 @@
 package weighhouse.formula;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.BufferedReader;
 import java.io.IOException;
@@ -38,6 +39,25 @@ class RoundTripTest {
         RandomTrees.canonical(tree, row, column), RandomTrees.canonical(parsed, row, column), text);
     assertEquals(text, FormulaPrinter.print(parsed, row, column));
     assertEquals(parsed, FormulaParser.parse(text, row, column).tree());
+  }
+
+  /** A cell further down that holds the same tree mostly has the same key, and never another's. */
+  @ParameterizedTest
+  @MethodSource("uglyFormulas")
+  void movedFormulasHaveEqualTreesWhereKeysAreEqual(String text) throws FormulaSyntaxException {
+    String body = text.substring(text.indexOf('=') + 1);
+    for (int move = 1; move < 4; move++) {
+      String key = ShapeIndexTest.key(body, 6, 3);
+      Expr tree = FormulaParser.parse(body, 6, 3).tree();
+      boolean sameTree = tree.equals(FormulaParser.parse(body, 6 + move, 3 + move).tree());
+      assertTrue(sameTree || !key.equals(ShapeIndexTest.key(body, 6 + move, 3 + move)), body);
+      String moved = FormulaPrinter.print(tree, 6 + move, 3 + move);
+      String printed = FormulaPrinter.print(tree, 6, 3);
+      assertEquals(
+          text.contains("XFD") ? "at the edge" : ShapeIndexTest.key(printed, 6, 3),
+          text.contains("XFD") ? "at the edge" : ShapeIndexTest.key(moved, 6 + move, 3 + move),
+          moved);
+    }
   }
 
   @Provide
