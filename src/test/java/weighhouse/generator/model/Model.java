@@ -1,0 +1,37 @@
+package weighhouse.generator.model;
+
+import java.util.List;
+import java.util.NoSuchElementException;
+
+/** A cohort model before it is laid out. */
+public record Model(
+    Scenario scenario,
+    CycleUnit unit,
+    CycleInput cycleInput,
+    int cycles,
+    List<Event> events,
+    List<Input> inputs) {
+
+  /** The words of its cells. */
+  public Words words() {
+    return scenario.words();
+  }
+
+  /** Event of a key. */
+  public Event event(String key) {
+    return events.stream()
+        .filter(event -> event.key().equals(key))
+        .findFirst()
+        .orElseThrow(() -> new NoSuchElementException(key));
+  }
+
+  /** Events laid out as scalars. */
+  public List<Event> scalars() {
+    return events.stream().filter(event -> !event.form().basis().alongCycles()).toList();
+  }
+
+  /** Events laid out along the cycles. */
+  public List<Event> alongCycles() {
+    return events.stream().filter(event -> event.form().basis().alongCycles()).toList();
+  }
+}
