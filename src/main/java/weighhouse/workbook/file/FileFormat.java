@@ -39,7 +39,7 @@ enum FileFormat {
       return "is an empty zip archive" + GIVE;
     }
     if (isBareBiff(file)) {
-      return "was saved by Excel 4 or older: open it in Excel or LibreOffice and save it as .xlsx";
+      return "was saved by Excel 95 or older: open it in Excel or LibreOffice and save it as .xlsx";
     }
     String text =
         new String(file, 0, Math.min(LOOKED_AT, file.length), StandardCharsets.UTF_8)
@@ -56,11 +56,11 @@ enum FileFormat {
     return "is no workbook" + GIVE;
   }
 
-  /** Sheets of Excel 2, 3 and 4 start with their first record, in no container. */
+  /** Sheets of Excel 2 to 4, and some of Excel 95, start with a record, in no container. */
   private static boolean isBareBiff(byte[] file) {
     return file.length > 4
         && file[0] == 9
-        && (file[1] == 0 || file[1] == 2 || file[1] == 4)
+        && (file[1] == 0 || file[1] == 2 || file[1] == 4 || file[1] == 8)
         && file[3] == 0
         && file[2] >= 4
         && file[2] <= 8;
