@@ -16,11 +16,8 @@ final class TextPool {
   private long[] ends = new long[1 << 6];
 
   private int size;
+  private int[] hashes = new int[1 << 6];
   private int[] slots = new int[1 << 8];
-
-  int size() {
-    return size;
-  }
 
   /** Id of the text, which is added unless it is known. */
   int intern(char[] text, int start, int length) {
@@ -31,17 +28,17 @@ final class TextPool {
       all |= text[i];
     }
     boolean wide = all > 0xff;
-    int mask = slots.length - 1;
-    int slot = spread(hash) & mask;
+    int slot = slot(hash);
     while (slots[slot] != 0) {
       int id = slots[slot] - 1;
-      if (holds(id, text, start, length, wide)) {
+      if (hashes[id] == hash && holds(id, text, start, length, wide)) {
         return id;
       }
-      slot = (slot + 1) & mask;
+      slot = (slot + 1) & (slots.length - 1);
     }
     slots[slot] = size + 1;
     append(text, start, length, wide);
+    hashes[size - 1] = hash;
     if (size * 2 > slots.length) {
       rehash();
     }
@@ -60,12 +57,13 @@ final class TextPool {
   void seal() {
     bytes = Arrays.copyOf(bytes, used);
     ends = Arrays.copyOf(ends, size);
+    hashes = new int[0];
     slots = new int[0];
   }
 
-  private static int spread(int hash) {
+  private int slot(int hash) {
     int mixed = hash * 0x9E3779B9;
-    return mixed ^ (mixed >>> 16);
+    return (mixed ^ (mixed >>> 16)) & (slots.length - 1);
   }
 
   private int start(int id) {
@@ -113,22 +111,17 @@ final class TextPool {
     }
     if (size == ends.length) {
       ends = Arrays.copyOf(ends, Growth.atLeast(size, size + 1));
+      hashes = Arrays.copyOf(hashes, ends.length);
     }
     ends[size++] = (long) used << 1 | (wide ? 1 : 0);
   }
 
   private void rehash() {
-    slots = new int[Math.max(slots.length * 2, 4)];
-    int mask = slots.length - 1;
+    slots = new int[slots.length * 2];
     for (int id = 0; id < size; id++) {
-      int hash = 0;
-      int step = isWide(id) ? 2 : 1;
-      for (int at = start(id); at < end(id); at += step) {
-        hash = 31 * hash + letter(at, step == 2);
-      }
-      int slot = spread(hash) & mask;
+      int slot = slot(hashes[id]);
       while (slots[slot] != 0) {
-        slot = (slot + 1) & mask;
+        slot = (slot + 1) & (slots.length - 1);
       }
       slots[slot] = id + 1;
     }

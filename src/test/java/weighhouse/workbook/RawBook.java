@@ -51,6 +51,8 @@ final class RawBook {
         "[Content_Types].xml",
         "<Types xmlns='%s'><Default Extension='xml' ContentType='application/xml'/>"
                 .formatted(TYPES)
+            + "<Default Extension='rels' ContentType='"
+            + "application/vnd.openxmlformats-package.relationships+xml'/>"
             + "<Override PartName='/xl/workbook.xml' ContentType='"
             + ofMain
             + "'/></Types>");

@@ -89,7 +89,8 @@ public class ReadingBenchmark {
       book.part("xl/worksheets/sheet" + s + ".xml", whole(sheet(formulas / SHEETS, shared)));
       tabs.append("<sheet name='S%d' sheetId='%d' r:id='r%d'/>".formatted(s, s, s));
     }
-    return book.main("<sheets>" + tabs + "</sheets>").bytes();
+    String names = "<definedNames><definedName name='rate'>S!$A$1</definedName></definedNames>";
+    return book.main("<sheets>" + tabs + "</sheets>" + names).bytes();
   }
 
   private static String whole(String content) {
@@ -117,7 +118,7 @@ public class ReadingBenchmark {
     if (shared && r > 0) {
       return "<f t=\"shared\" si=\"" + c + "\"/>";
     }
-    String text = A1.cell(r, c) + "*(1-Inputs!$B$" + (c + 1) + ")*(1-EXP(-rate*$A" + (r + 1) + "))";
+    String text = A1.cell(r, c) + "*(1-$B$" + (c + 1) + ")*(1-EXP(-rate*$A" + (r + 1) + "))";
     return shared
         ? "<f t=\"shared\" ref=\"%s:%s\" si=\"%d\">"
                 .formatted(A1.cell(0, c), A1.cell(rows - 1, c), c)

@@ -9,15 +9,15 @@ import java.util.zip.ZipException;
 import weighhouse.workbook.WorkbookFault;
 
 /**
- * Stops at a part that inflates beyond all reason. Sheets of real workbooks shrink 5 to 30 times,
- * filled ranges and empty styled rows 100 times and more; a bomb comes near deflate's limit of 1032
- * at a size that matters.
+ * Stops at a part that inflates beyond all reason. Measured with deflate: rows of formulas shrink
+ * 12 times, a million empty styled rows 16 times, endless like rows without addresses 340 times; a
+ * bomb comes near the limit of 1032 at a size that matters.
  */
 final class GuardedStream extends FilterInputStream {
   /** Below this size any ratio is harmless. */
   static final long SMALL = 64L << 20;
 
-  static final int HIGHEST_RATIO = 300;
+  static final int HIGHEST_RATIO = 500;
 
   /** Of all parts read from one workbook together. */
   static final long HIGHEST_TOTAL = 3L << 29;
