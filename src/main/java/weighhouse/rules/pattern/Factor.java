@@ -1,0 +1,14 @@
+package weighhouse.rules.pattern;
+
+import weighhouse.formula.Expr;
+
+/** One factor of a product as written; an inverse one divides. */
+public record Factor(Expr node, boolean inverse) {
+  /** What a sign in front of a product is a factor of. */
+  static final Expr SIGN = new Expr.Num(-1, "-1");
+
+  @SuppressWarnings("ReferenceEquality") // a number -1 that someone wrote is not the sign
+  boolean isSign() {
+    return node == SIGN;
+  }
+}

@@ -1,0 +1,73 @@
+package weighhouse.rules.pattern;
+
+import java.util.EnumSet;
+import java.util.Set;
+import weighhouse.quantity.Kind;
+import weighhouse.quantity.Quantity;
+import weighhouse.rules.term.Identity;
+import weighhouse.rules.term.Sample;
+import weighhouse.rules.term.Term;
+
+/**
+ * Recognises a ratio that was faded, shared out or switched: whatever is 1 when the ratio is 1,
+ * with everything else as it may be, is that ratio still. {@code 1-(1-HR)*w}, {@code HR^w}, {@code
+ * IF(on,HR,1)} and {@code EXP(w*LN(HR))} are examples.
+ */
+final class FadedRatios {
+  static final Set<Kind> RATIOS =
+      EnumSet.of(
+          Kind.HAZARD_RATIO,
+          Kind.RATE_RATIO,
+          Kind.RISK_RATIO,
+          Kind.ODDS_RATIO,
+          Kind.MORTALITY_RATIO,
+          Kind.TIME_RATIO,
+          Kind.RELATIVE_EFFECT);
+
+  private static final int SAMPLES = 4;
+
+  private final FormulaView view;
+
+  FadedRatios(FormulaView view) {
+    this.view = view;
+  }
+
+  /** The quantity told, unless nothing is told and the term is a faded ratio. */
+  Quantity orElse(Term term, Quantity told) {
+    if (told.kind() != Kind.UNKNOWN || term.parts().isEmpty() || dependsOnEvents(term)) {
+      return told;
+    }
+    for (Term part : view.readTerms()) {
+      if (part != term
+          && part.parts().isEmpty()
+          && term.contains(part)
+          && RATIOS.contains(view.quantity(part).kind())
+          && isOneWith(term, part)) {
+        return view.quantity(part);
+      }
+    }
+    return told;
+  }
+
+  /** A ratio that depends on the baseline is another measure: odds made into risks, for one. */
+  private boolean dependsOnEvents(Term term) {
+    for (Term part : view.readTerms()) {
+      if (part.parts().isEmpty() && term.contains(part) && view.isEvent(part)) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  private static boolean isOneWith(Term term, Term ratio) {
+    boolean moves = false;
+    for (int seed = 1; seed <= SAMPLES; seed++) {
+      int size = term.id() + 1;
+      if (!Identity.agree(new Sample(seed, size).with(ratio, 1).of(term), 1)) {
+        return false;
+      }
+      moves |= !Identity.agree(new Sample(seed, size).with(ratio, 0.5).of(term), 1);
+    }
+    return moves;
+  }
+}
