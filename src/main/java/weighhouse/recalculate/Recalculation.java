@@ -2,6 +2,7 @@ package weighhouse.recalculate;
 
 import java.util.List;
 import java.util.Set;
+import weighhouse.formula.Expr;
 import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.CellRange;
 
@@ -16,8 +17,14 @@ public interface Recalculation {
   /** The workbook with some cells replaced; runs only what depends on them. */
   Values whatIf(Change change);
 
+  /**
+   * The workbook with some cells replaced and all random numbers drawn anew. A cell draws the same
+   * numbers for one seed whatever the change, so that two changes compare under common draws.
+   */
+  Values draw(long seed, Change change);
+
   /** Evaluates one expression as if it stood in the host cell. */
-  Value evaluate(weighhouse.formula.Expr expression, CellAddress host, Values values);
+  Value evaluate(Expr expression, CellAddress host, Values values);
 
   /** Formula cells that read the given cells, directly or through others. */
   List<CellRange> dependents(Set<CellAddress> cells);

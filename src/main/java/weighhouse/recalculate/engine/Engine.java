@@ -1,0 +1,174 @@
+package weighhouse.recalculate.engine;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Queue;
+import java.util.Set;
+import java.util.concurrent.ConcurrentLinkedQueue;
+import java.util.function.Function;
+import weighhouse.formula.Expr;
+import weighhouse.recalculate.Change;
+import weighhouse.recalculate.Recalculation;
+import weighhouse.recalculate.Replay;
+import weighhouse.recalculate.Value;
+import weighhouse.recalculate.Values;
+import weighhouse.recalculate.cells.CellState;
+import weighhouse.recalculate.cells.Layout;
+import weighhouse.recalculate.functions.Fault;
+import weighhouse.recalculate.order.Unit;
+import weighhouse.recalculate.program.Compiler;
+import weighhouse.recalculate.program.Footprint;
+import weighhouse.recalculate.program.Frame;
+import weighhouse.recalculate.program.Program;
+import weighhouse.recalculate.program.Strip;
+import weighhouse.recalculate.program.UnsupportedFormulaException;
+import weighhouse.workbook.CellAddress;
+import weighhouse.workbook.CellRange;
+
+/** Calculation of one compiled workbook. */
+final class Engine implements Recalculation {
+  private final Model model;
+  private final CellState base;
+  private final Plans plans;
+  private final Replay replay;
+  private final CalculatedValues baseValues;
+  private final Queue<Scratch> idle = new ConcurrentLinkedQueue<>();
+
+  Engine(Model model) {
+    this.model = model;
+    BaseRun run = new BaseRun(model);
+    this.base = run.values();
+    this.plans = run.plans();
+    this.replay = run.replay();
+    this.baseValues =
+        new CalculatedValues(model.layout(), base, new int[0], new CellState[0], Map.of());
+  }
+
+  @Override
+  public Values base() {
+    return baseValues;
+  }
+
+  @Override
+  public Replay replay() {
+    return replay;
+  }
+
+  @Override
+  public Values whatIf(Change change) {
+    return borrowing(scratch -> run(change, plans.with(difference(change)), Set.of(), scratch));
+  }
+
+  @Override
+  public Values draw(long seed, Change change) {
+    Plans.Planned planned = plans.with(difference(change));
+    Set<Unit> kept = new HashSet<>(planned.kept());
+    Set<Integer> drawing = new HashSet<>();
+    List<Unit> units = planned.plan().units();
+    for (int unit = 0; unit < units.size(); unit++) {
+      if (units.get(unit).program().drawing()) {
+        kept.remove(units.get(unit));
+        drawing.add(unit);
+      }
+    }
+    Plans.Planned drawn = new Plans.Planned(planned.plan(), kept, planned.replaced());
+    return borrowing(
+        scratch -> {
+          scratch.runner().frame().seed = seed;
+          return run(change, drawn, drawing, scratch);
+        });
+  }
+
+  private <T> T borrowing(Function<Scratch, T> use) {
+    Scratch scratch = idle.poll();
+    if (scratch == null) {
+      scratch = new Scratch(model.layout(), base, model.names());
+    }
+    T result = use.apply(scratch);
+    scratch.reset();
+    idle.add(scratch);
+    return result;
+  }
+
+  private Plans.Difference difference(Change change) {
+    Set<CellAddress> constants = new HashSet<>();
+    for (CellAddress cell : change.values().keySet()) {
+      plans.base().plan().unitsIn(CellRange.of(cell), unit -> constants.add(cell));
+    }
+    return new Plans.Difference(change.formulas(), constants);
+  }
+
+  private Values run(Change change, Plans.Planned planned, Set<Integer> drawing, Scratch scratch) {
+    PartialRun run = new PartialRun(planned.plan(), planned.kept(), scratch);
+    Map<CellAddress, Value> beside = new HashMap<>();
+    change
+        .values()
+        .forEach(
+            (cell, value) -> {
+              int slot = slot(cell);
+              if (slot == Layout.NOWHERE) {
+                beside.put(cell, value);
+              } else {
+                scratch.set(slot, value);
+              }
+              run.changed(CellRange.of(cell));
+            });
+    List<Unit> units = planned.plan().units();
+    planned.replaced().forEach(unit -> run.mark(unit, units.get(unit).hosts()));
+    drawing.forEach(unit -> run.mark(unit, units.get(unit).hosts()));
+    run.run();
+    return scratch.values(beside);
+  }
+
+  private int slot(CellAddress cell) {
+    return model.layout().slot(cell.sheet(), cell.row(), cell.column());
+  }
+
+  @Override
+  public Value evaluate(Expr expression, CellAddress host, Values values) {
+    boolean across = model.layout().across(host.sheet());
+    Program program;
+    try {
+      program = Compiler.compile(expression, host, false, across, model.names());
+    } catch (UnsupportedFormulaException e) {
+      return Fault.NAME.value();
+    }
+    if (!(values instanceof CalculatedValues calculated)) {
+      throw new IllegalArgumentException("values of another calculation");
+    }
+    return borrowing(
+        scratch -> {
+          calculated.putInto(scratch.state(), scratch.stretches());
+          Frame frame = scratch.runner().frame();
+          frame.enter(new Strip(program, CellRange.of(host), model.layout()));
+          frame.moveTo(0);
+          return program.root().result(frame);
+        });
+  }
+
+  @Override
+  public List<CellRange> dependents(Set<CellAddress> cells) {
+    return new Dependents(plans.base().plan()).of(cells);
+  }
+
+  @Override
+  public List<CellRange> precedents(CellAddress cell) {
+    List<CellRange> read = new ArrayList<>();
+    plans
+        .base()
+        .plan()
+        .unitsIn(
+            CellRange.of(cell),
+            number -> {
+              Unit unit = plans.base().plan().units().get(number);
+              CellAddress host = unit.whole() ? unit.hosts().first() : cell;
+              for (Footprint footprint : unit.reads()) {
+                read.add(footprint.at(host.row(), host.column()));
+              }
+            });
+    return read.stream().distinct().toList();
+  }
+}
