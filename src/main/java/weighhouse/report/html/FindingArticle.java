@@ -44,7 +44,7 @@ final class FindingArticle {
     Element head = article.appendElement("header");
     Element title = head.appendElement("h3").attr("id", id + "-h");
     Opening.severity(title, finding.severity());
-    title.appendText(finding.rule().title());
+    Tags.text(title, "span", "", finding.rule().title());
     Element where = Tags.add(head, "p", "where");
     for (var range : finding.cells()) {
       Tags.text(where, "code", "", workbook.show(range));

@@ -11,9 +11,9 @@ import org.jsoup.nodes.Document;
 import org.jsoup.nodes.Element;
 import org.junit.jupiter.api.Test;
 import weighhouse.audit.AuditResult;
-import weighhouse.report.format.Format;
 import weighhouse.report.Samples;
 import weighhouse.report.SchemaCheck;
+import weighhouse.report.format.Format;
 
 class HtmlReportTest {
   private static Document parsed(AuditResult result) throws IOException {

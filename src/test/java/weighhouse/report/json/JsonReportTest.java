@@ -13,9 +13,9 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import weighhouse.audit.AuditResult;
-import weighhouse.report.format.Format;
 import weighhouse.report.Samples;
 import weighhouse.report.SchemaCheck;
+import weighhouse.report.format.Format;
 
 class JsonReportTest {
   private static final Path SCHEMA = Path.of("docs/schema/audit.schema.json");
