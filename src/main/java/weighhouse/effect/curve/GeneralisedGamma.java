@@ -4,11 +4,11 @@ import java.util.Optional;
 import org.apache.commons.math3.special.Gamma;
 
 /**
- * Generalised gamma in Prentice's form: with {@code w = (ln t - mu)/sigma} and {@code u = exp(q*w) /
- * q^2}, survival is the upper regularised incomplete gamma function of {@code (1/q^2, u)} for q
- * above 0, and the lower one for q below 0. q = 1 is the Weibull, q = 0 the log-normal. No parameter
- * carries a hazard ratio in general. Near q = 0 (below 1e-3 in size) the log-normal limit is taken,
- * with an error of the order of q.
+ * Generalised gamma in Prentice's form: with {@code w = (ln t - mu)/sigma} and {@code u = exp(q*w)
+ * / q^2}, survival is the upper regularised incomplete gamma function of {@code (1/q^2, u)} for q
+ * above 0, and the lower one for q below 0. q = 1 is the Weibull, q = 0 the log-normal. No
+ * parameter carries a hazard ratio in general. Near q = 0 (below 1e-3 in size) the log-normal limit
+ * is taken, with an error of the order of q.
  *
  * <p>Source: Prentice RL, Biometrika 1974;61:539-544 (from memory).
  *
@@ -55,9 +55,7 @@ public record GeneralisedGamma(double mu, double sigma, double q) implements Cur
 
   @Override
   public Optional<Curve> withHazardRatio(double ratio) {
-    return q == 1
-        ? new Weibull(1 / sigma, Math.exp(mu)).withHazardRatio(ratio)
-        : Optional.empty();
+    return q == 1 ? new Weibull(1 / sigma, Math.exp(mu)).withHazardRatio(ratio) : Optional.empty();
   }
 
   @Override

@@ -4,8 +4,8 @@ import java.util.Optional;
 
 /**
  * Gompertz: {@code h(t) = rate * exp(shape * t)}, {@code S(t) = exp(-rate/shape * (exp(shape*t) -
- * 1))}. The rate carries a hazard ratio. With a negative shape a share {@code exp(rate/shape)} never
- * has the event.
+ * 1))}. The rate carries a hazard ratio. With a negative shape a share {@code exp(rate/shape)}
+ * never has the event.
  *
  * @param shape per unit of time, any sign; 0 is the exponential
  * @param rate hazard at time 0 per unit of time, above 0

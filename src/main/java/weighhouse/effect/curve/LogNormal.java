@@ -24,7 +24,9 @@ public record LogNormal(double mu, double sigma) implements Curve {
   @Override
   public double cumulativeHazard(double time) {
     double z = standardised(time);
-    return z < 0 ? -Math.log1p(-StandardNormal.upperTail(-z)) : -Math.log(StandardNormal.upperTail(z));
+    return z < 0
+        ? -Math.log1p(-StandardNormal.upperTail(-z))
+        : -Math.log(StandardNormal.upperTail(z));
   }
 
   @Override

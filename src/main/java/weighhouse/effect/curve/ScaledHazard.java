@@ -3,7 +3,8 @@ package weighhouse.effect.curve;
 import java.util.Optional;
 
 /**
- * A curve with every hazard multiplied, for families that hold no such parameter: {@code S(t)^ratio}.
+ * A curve with every hazard multiplied, for families that hold no such parameter: {@code
+ * S(t)^ratio}.
  *
  * @param base the curve without the effect
  * @param ratio hazard ratio, above 0

@@ -3,9 +3,9 @@ package weighhouse.effect.curve;
 import java.util.Optional;
 
 /**
- * Weibull: {@code S(t) = exp(-(t/scale)^shape)}, which is {@code exp(-lambda * t^shape)} with {@code
- * lambda = scale^-shape}. In the lambda form a hazard ratio multiplies lambda; in the scale form it
- * makes the scale {@code scale * HR^(-1/shape)}, and a time ratio multiplies the scale.
+ * Weibull: {@code S(t) = exp(-(t/scale)^shape)}, which is {@code exp(-lambda * t^shape)} with
+ * {@code lambda = scale^-shape}. In the lambda form a hazard ratio multiplies lambda; in the scale
+ * form it makes the scale {@code scale * HR^(-1/shape)}, and a time ratio multiplies the scale.
  *
  * @param shape above 0; 1 is the exponential
  * @param scale in units of time, above 0

@@ -1,8 +1,8 @@
 package weighhouse.effect.estimate;
 
 /**
- * Events and non-events of two arms. No continuity correction is made: a zero cell gives an infinite
- * or undefined logarithm.
+ * Events and non-events of two arms. No continuity correction is made: a zero cell gives an
+ * infinite or undefined logarithm.
  *
  * <p>Sources: bland-altman-2000, colditz-1994 (use).
  *
@@ -35,8 +35,7 @@ public record EventCounts(double events1, double others1, double events0, double
     double total0 = events0 + others0;
     double total = total1 + total0;
     double events = events1 + events0;
-    double variance =
-        events * (total - events) * total1 * total0 / (total * total * (total - 1));
+    double variance = events * (total - events) * total1 * total0 / (total * total * (total - 1));
     return new ObservedExpected(events1 - events * total1 / total, variance);
   }
 }

@@ -4,8 +4,8 @@ import java.util.List;
 import weighhouse.effect.StandardNormal;
 
 /**
- * Observed less expected events of one arm and the variance of the difference, as log-rank tests and
- * two-by-two tables give them. Their ratio estimates a log hazard or odds ratio near 1.
+ * Observed less expected events of one arm and the variance of the difference, as log-rank tests
+ * and two-by-two tables give them. Their ratio estimates a log hazard or odds ratio near 1.
  *
  * <p>Sources: tierney-2007, pignon-2000 (use); Yusuf et al. 1985 for the one-step estimate (from
  * memory).

@@ -4,11 +4,11 @@ import java.util.List;
 import java.util.function.DoubleUnaryOperator;
 
 /**
- * Inverse-variance pooling of ratios on the log scale. Lists of fewer than one estimate throw {@link
- * IllegalArgumentException}; a standard error of 0 gives NaN.
+ * Inverse-variance pooling of ratios on the log scale. Lists of fewer than one estimate throw
+ * {@link IllegalArgumentException}; a standard error of 0 gives NaN.
  *
- * <p>Sources: colditz-1994 and tsd-2 (use); DerSimonian and Laird, Control Clin Trials 1986;7:177-188
- * (from memory); restricted likelihood by Fisher scoring, common practice.
+ * <p>Sources: colditz-1994 and tsd-2 (use); DerSimonian and Laird, Control Clin Trials
+ * 1986;7:177-188 (from memory); restricted likelihood by Fisher scoring, common practice.
  */
 public final class Pooling {
   private static final int MOST_STEPS = 1000;

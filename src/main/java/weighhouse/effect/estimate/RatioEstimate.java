@@ -4,8 +4,8 @@ import weighhouse.effect.StandardNormal;
 
 /**
  * An estimated ratio on the log scale. Multipliers z of the standard error are the caller's: {@code
- * StandardNormal.multiplier(0.95)}, or 1.96 where a paper's arithmetic is followed. Numbers without a
- * logarithm give NaN.
+ * StandardNormal.multiplier(0.95)}, or 1.96 where a paper's arithmetic is followed. Numbers without
+ * a logarithm give NaN.
  *
  * <p>Sources: parmar-1998, tierney-2007, altman-bland-2003, bucher-1997.
  *

@@ -38,9 +38,9 @@ public final class Generator {
   }
 
   /**
-   * Probability of being in the second state of a chain 1 to 2 to 3, with 1 to 3 too, after one unit
-   * of time: {@code a/(a+b-c) * (exp(-c) - exp(-(a+b)))}, with the limit {@code a*exp(-c)} where
-   * {@code a + b = c}. All rates at least 0.
+   * Probability of being in the second state of a chain 1 to 2 to 3, with 1 to 3 too, after one
+   * unit of time: {@code a/(a+b-c) * (exp(-c) - exp(-(a+b)))}, with the limit {@code a*exp(-c)}
+   * where {@code a + b = c}. All rates at least 0.
    *
    * @param a rate from 1 to 2
    * @param b rate from 1 to 3

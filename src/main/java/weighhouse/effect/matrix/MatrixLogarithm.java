@@ -40,7 +40,9 @@ public final class MatrixLogarithm {
       if (misses(byEigenvectors, matrix) < EIGENVECTORS_GOOD) {
         return Optional.of(byEigenvectors);
       }
-    } catch (SingularMatrixException | ArithmeticException | MaxCountExceededException tooFewEigenvectors) {
+    } catch (SingularMatrixException
+        | ArithmeticException
+        | MaxCountExceededException tooFewEigenvectors) {
       // The other way needs none.
     }
     try {

@@ -5,8 +5,8 @@ import java.util.Optional;
 import org.apache.commons.math3.linear.RealMatrix;
 
 /**
- * A transition matrix carried to a shorter cycle (or, as a power, to another one): {@code P^fraction
- * = exp(fraction * log P)}, and whether that is a transition matrix.
+ * A transition matrix carried to a shorter cycle (or, as a power, to another one): {@code
+ * P^fraction = exp(fraction * log P)}, and whether that is a transition matrix.
  *
  * <p>Only the principal root is looked at; a matrix may have others. Sources: chhatwal-2016,
  * jahn-2019.
@@ -78,7 +78,8 @@ public final class MatrixRoot {
    * @return empty where there is no real root to start from
    */
   public Optional<NearestRoot> nearest(Regularisation method) {
-    return principal().map(r -> NearestRoot.of(matrix, fraction, method.apply(matrix, fraction, r)));
+    return principal()
+        .map(r -> NearestRoot.of(matrix, fraction, method.apply(matrix, fraction, r)));
   }
 
   private static double smallest(double[][] entries) {

@@ -3,21 +3,18 @@ package weighhouse.effect.matrix;
 import java.util.Arrays;
 import org.apache.commons.math3.linear.RealMatrix;
 
-/**
- * A transition matrix that stands in for a root that is none.
- *
- * @param matrix transition probabilities over the new cycle
- * @param largestMiss largest difference, in size, between its power over the old cycle and the old
- *     matrix
- * @param totalMiss square root of the sum of squared differences
- */
-public record NearestRoot(double[][] matrix, double largestMiss, double totalMiss) {
+/** A transition matrix that stands in for a root that is none, and by how much it misses. */
+public final class NearestRoot {
+  private final double[][] candidate;
+  private final RealMatrix miss;
+
+  private NearestRoot(double[][] candidate, RealMatrix miss) {
+    this.candidate = candidate;
+    this.miss = miss;
+  }
 
   static NearestRoot of(double[][] original, double fraction, double[][] candidate) {
-    RealMatrix difference =
-        power(candidate, 1 / fraction).subtract(Square.of(original));
-    return new NearestRoot(
-        candidate, Square.largest(difference), difference.getFrobeniusNorm());
+    return new NearestRoot(candidate, power(candidate, 1 / fraction).subtract(Square.of(original)));
   }
 
   private static RealMatrix power(double[][] candidate, double cycles) {
@@ -30,16 +27,18 @@ public record NearestRoot(double[][] matrix, double largestMiss, double totalMis
         .orElseThrow(() -> new IllegalArgumentException("No power of " + cycles + " cycles"));
   }
 
-  @Override
-  public boolean equals(Object other) {
-    return other instanceof NearestRoot that
-        && Arrays.deepEquals(matrix, that.matrix)
-        && largestMiss == that.largestMiss
-        && totalMiss == that.totalMiss;
+  /** Transition probabilities over the new cycle. */
+  public double[][] matrix() {
+    return Arrays.stream(candidate).map(double[]::clone).toArray(double[][]::new);
   }
 
-  @Override
-  public int hashCode() {
-    return Arrays.deepHashCode(matrix);
+  /** Largest difference, in size, between its power over the old cycle and the old matrix. */
+  public double largestMiss() {
+    return Square.largest(miss);
+  }
+
+  /** Square root of the sum of the squared differences. */
+  public double totalMiss() {
+    return miss.getFrobeniusNorm();
   }
 }

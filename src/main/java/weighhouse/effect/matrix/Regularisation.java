@@ -4,7 +4,8 @@ import java.util.Arrays;
 import org.apache.commons.math3.linear.RealMatrix;
 
 /**
- * Published ways to make a transition matrix of a root that has negative entries. Named from memory.
+ * Published ways to make a transition matrix of a root that has negative entries. Named from
+ * memory.
  */
 public enum Regularisation {
   /**

@@ -24,8 +24,7 @@ final class SquareRoots {
       root = squareRoot(root);
       roots++;
     }
-    RealMatrix x =
-        root.subtract(identity).multiply(inverse(root.add(identity)));
+    RealMatrix x = root.subtract(identity).multiply(inverse(root.add(identity)));
     return series(x).scalarMultiply(Math.scalb(2.0, roots));
   }
 

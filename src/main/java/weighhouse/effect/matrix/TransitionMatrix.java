@@ -6,8 +6,8 @@ import org.apache.commons.math3.linear.SingularMatrixException;
 import weighhouse.effect.Probability;
 
 /**
- * Transition probabilities over one cycle: powers, expected visits, and the rescaling of entries one
- * by one that workbooks do.
+ * Transition probabilities over one cycle: powers, expected visits, and the rescaling of entries
+ * one by one that workbooks do.
  */
 public final class TransitionMatrix {
   private TransitionMatrix() {}
@@ -43,8 +43,8 @@ public final class TransitionMatrix {
   }
 
   /**
-   * Every entry off the diagonal rescaled alone, {@code 1 - (1 - p)^fraction}, and the diagonal made
-   * good: what should not be done with three states or more, to show what it gives
+   * Every entry off the diagonal rescaled alone, {@code 1 - (1 - p)^fraction}, and the diagonal
+   * made good: what should not be done with three states or more, to show what it gives
    * (chhatwal-2016, gidwani-russell-2020).
    *
    * @param fraction new cycle length in old cycles, at least 0

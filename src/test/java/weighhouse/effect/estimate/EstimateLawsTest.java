@@ -21,8 +21,7 @@ class EstimateLawsTest {
       @ForAll @DoubleRange(min = 0.1, max = 5) double ratio,
       @ForAll @DoubleRange(min = 0.01, max = 1) double error) {
     RatioEstimate estimate = new RatioEstimate(Math.log(ratio), error);
-    RatioEstimate again =
-        RatioEstimate.ofInterval(ratio, estimate.lower(Z), estimate.upper(Z), Z);
+    RatioEstimate again = RatioEstimate.ofInterval(ratio, estimate.lower(Z), estimate.upper(Z), Z);
     assertEquals(error, again.standardError(), 1e-13);
     RatioEstimate inverse = estimate.reciprocal();
     assertEquals(1 / estimate.upper(Z), inverse.lower(Z), 1e-12 * inverse.lower(Z));

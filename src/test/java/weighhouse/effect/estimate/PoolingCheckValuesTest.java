@@ -75,10 +75,7 @@ class PoolingCheckValuesTest {
         .map(
             row ->
                 new EventCounts(
-                    row.number("tpos"),
-                    row.number("tneg"),
-                    row.number("cpos"),
-                    row.number("cneg")))
+                    row.number("tpos"), row.number("tneg"), row.number("cpos"), row.number("cneg")))
         .toList();
   }
 

@@ -51,8 +51,7 @@ class MatrixCheckValuesTest {
     double[] split = CompetingExits.probabilities(0.15, 0.006);
     double[][] log = MatrixLogarithm.of(hiv()).orElseThrow();
     double[][] month = MatrixRoot.of(hiv(), MONTH).principal().orElseThrow();
-    double[][] year =
-        TransitionMatrix.power(TransitionMatrix.elementByElement(hiv(), MONTH), 12);
+    double[][] year = TransitionMatrix.power(TransitionMatrix.elementByElement(hiv(), MONTH), 12);
     double[][] threeYears = {
       {0.251, 0.495, 0.200, 0.054},
       {0.078, 0.426, 0.304, 0.191},

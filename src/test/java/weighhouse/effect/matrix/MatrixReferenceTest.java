@@ -28,8 +28,7 @@ class MatrixReferenceTest {
     checkSpan(name, rates, "2", 2);
     double[][] scaled = Generator.scaleEntering(rates, rates.length - 1, 0.6);
     assertMatrix(expected(name, "generator_death_hr_0.6"), scaled);
-    assertMatrix(
-        expected(name, "probability_1y_death_hr_0.6"), Generator.probabilities(scaled, 1));
+    assertMatrix(expected(name, "probability_1y_death_hr_0.6"), Generator.probabilities(scaled, 1));
   }
 
   private static void checkSpan(String name, double[][] rates, String label, double span) {
