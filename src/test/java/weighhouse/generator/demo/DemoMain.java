@@ -5,8 +5,6 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
-import java.util.SortedSet;
 import weighhouse.generator.Ranges;
 import weighhouse.generator.book.BookWriter;
 import weighhouse.generator.book.CellAt;
@@ -19,59 +17,87 @@ import weighhouse.generator.model.Model;
 
 /** {@code DemoMain FOLDER SOFFICE} makes the demo workbooks and their README. */
 public final class DemoMain {
-  private DemoMain() {}
+  private final Path folder;
+  private final List<String> text = new ArrayList<>();
+
+  private DemoMain(Path folder) {
+    this.folder = folder;
+  }
+
+  /** A demo workbook, and its fault-free twin to read right formulas from. */
+  private record Demo(String file, String what, ModelDraft draft, ModelDraft twin) {
+    static Demo of(String file, String what, Model model, boolean faulty, String layoutName) {
+      Layout layout = Layouts.named(layoutName);
+      ModelDraft draft = new ModelDraft(model, faulty, 1);
+      ModelDraft twin = new ModelDraft(model, false, 1);
+      layout.lay(draft);
+      layout.lay(twin);
+      return new Demo(file, what, draft, twin);
+    }
+  }
 
   /** Runs it. */
   public static void main(String[] args) throws IOException, InterruptedException {
-    Path folder = Files.createDirectories(Path.of(args[0]));
-    Layout cohort = Layouts.named("wide-table");
-    ModelDraft faulty = draft(CohortDemo.model(), true, cohort);
-    ModelDraft right = draft(CohortDemo.model(), false, cohort);
-    List<Path> files =
-        List.of(folder.resolve("cohort-faulty.xlsx"), folder.resolve("cohort-right.xlsx"));
-    BookWriter.write(faulty.book(), files.get(0));
-    BookWriter.write(right.book(), files.get(1));
-    Recalculation.inPlace(Path.of(args[1]), files);
-    Files.writeString(folder.resolve("README.md"), readme(faulty, right, files));
+    new DemoMain(Files.createDirectories(Path.of(args[0]))).make(Path.of(args[1]));
   }
 
-  private static ModelDraft draft(Model model, boolean faulty, Layout layout) {
-    ModelDraft draft = new ModelDraft(model, faulty, 1);
-    layout.lay(draft);
-    return draft;
+  private void make(Path soffice) throws IOException, InterruptedException {
+    Model cohort = CohortDemo.model();
+    List<Demo> demos =
+        List.of(
+            Demo.of(
+                "cohort-faulty.xlsx",
+                "monthly cohort model, with faults",
+                cohort,
+                true,
+                "wide-table"),
+            Demo.of("cohort-right.xlsx", "the same model done right", cohort, false, "wide-table"),
+            Demo.of(
+                "partitioned-survival.xlsx",
+                "monthly partitioned-survival model, with faults",
+                PartitionedDemo.model(),
+                true,
+                "heading-above"));
+    List<Path> files = demos.stream().map(demo -> folder.resolve(demo.file())).toList();
+    for (Demo demo : demos) {
+      BookWriter.write(demo.draft().book(), folder.resolve(demo.file()));
+    }
+    Recalculation.inPlace(soffice, files);
+    introduce(demos);
+    demos.forEach(this::faults);
+    Files.writeString(folder.resolve("README.md"), String.join("\n", text) + "\n");
   }
 
-  private static String readme(ModelDraft faulty, ModelDraft right, List<Path> files)
-      throws IOException {
-    List<String> text = new ArrayList<>();
+  private void introduce(List<Demo> demos) throws IOException {
     text.add("# Demo workbooks\n");
     text.add("An invented chronic condition and invented figures. Made by `DemoMain` in the test");
     text.add("tree, then opened, calculated and saved by LibreOffice.\n");
     text.add("| workbook | what | formulas |\n| --- | --- | --- |");
-    List<String> what =
-        List.of("monthly cohort model with the faults below", "the same model done right");
-    for (int i = 0; i < files.size(); i++) {
-      Path name = files.get(i).getFileName();
-      int formulas = StoredValues.of(files.get(i)).formulas();
-      text.add("| `%s` | %s | %d |".formatted(name, what.get(i), formulas));
+    for (Demo demo : demos) {
+      int formulas = StoredValues.of(folder.resolve(demo.file())).formulas();
+      text.add("| `%s` | %s | %d |".formatted(demo.file(), demo.what(), formulas));
     }
-    text.add("\n## Faults in `cohort-faulty.xlsx`\n");
-    text.add("| cells | rule | formula at the first cell | right formula |");
-    text.add("| --- | --- | --- | --- |");
-    for (Map.Entry<String, SortedSet<CellAt>> root : faulty.roots().entrySet()) {
-      text.add(row(root.getKey(), root.getValue(), faulty, right));
-    }
-    return String.join("\n", text) + "\n";
   }
 
-  private static String row(
-      String event, SortedSet<CellAt> cells, ModelDraft faulty, ModelDraft right) {
-    CellAt first = cells.first();
-    return "| %s | `%s` | `%s` | `%s` |"
-        .formatted(
-            String.join(", ", Ranges.of(cells)),
-            faulty.model().event(event).form().rule(),
-            faulty.book().formulaAt(first),
-            right.book().formulaAt(first));
+  private void faults(Demo demo) {
+    if (!demo.draft().faulty()) {
+      return;
+    }
+    text.add("\n## Faults in `" + demo.file() + "`\n");
+    text.add("| cells | rule | formula at the first cell | right formula |");
+    text.add("| --- | --- | --- | --- |");
+    demo.draft()
+        .roots()
+        .forEach(
+            (event, cells) -> {
+              CellAt first = cells.first();
+              text.add(
+                  "| %s | `%s` | `%s` | `%s` |"
+                      .formatted(
+                          String.join(", ", Ranges.of(cells)),
+                          demo.draft().model().event(event).form().rule(),
+                          demo.draft().book().formulaAt(first),
+                          demo.twin().book().formulaAt(first)));
+            });
   }
 }

@@ -1,5 +1,6 @@
 package weighhouse.generator.layout;
 
+import java.util.ArrayList;
 import java.util.List;
 import weighhouse.generator.model.CycleInput;
 import weighhouse.generator.model.ModelDraw.Frame;
@@ -35,6 +36,13 @@ public record Layout(String name, Frame frame, List<Placement> parts) {
   /** The same for models without probabilities that change from cycle to cycle. */
   public Layout constantOnly() {
     return new Layout(name, new Frame(frame.languages(), frame.cycleInputs(), false), parts);
+  }
+
+  /** The same with another part right after the inputs. */
+  public Layout with(Placement part) {
+    List<Placement> more = new ArrayList<>(parts);
+    more.add(1, part);
+    return new Layout(name, frame, more);
   }
 
   /** Writes a model. */

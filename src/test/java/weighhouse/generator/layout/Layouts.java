@@ -19,57 +19,47 @@ public final class Layouts {
   /** All of them. */
   public static List<Layout> all() {
     return List.of(
-        Layout.of(
-            "label-left",
-            new LabelLeftInputs(),
-            new LifeTable(),
-            new ParameterTable(),
-            new ArmSheets(),
-            new ResultsSheet()),
-        Layout.of(
-                "translated",
-                new LabelLeftInputs(),
-                new LifeTable(),
-                new ParameterTable(),
-                new ArmSheets(),
-                new ResultsSheet())
+        of("label-left", new LabelLeftInputs(), new ArmSheets()),
+        of("translated", new LabelLeftInputs(), new ArmSheets()).in("es", "de", "fr"),
+        of("translated-values-first", new ValueFirstInputs(), new AcrossTraces("trace", 0))
             .in("es", "de", "fr"),
-        Layout.of(
-            "wide-table",
-            new WideTableInputs(),
-            new LifeTable(),
-            new ParameterTable(),
-            new ArmSheets(),
-            new ResultsSheet()),
-        Layout.of(
-            "label-right",
-            new LabelRightInputs(),
-            new LifeTable(),
-            new ParameterTable(),
-            new AcrossTraces("trace", 0),
-            new ResultsSheet()),
-        Layout.of(
-                "names",
-                new NamedInputs(),
-                new LifeTable(),
-                new ParameterTable(),
-                new ArmSheets(),
-                new ResultsSheet())
-            .cycle(CycleInput.YEARS),
-        Layout.of(
-            "lookup",
-            new LookupInputs(),
-            new LifeTable(),
-            new ParameterTable(),
-            new AcrossTraces("Markov", 0),
-            new ResultsSheet()),
-        Layout.of(
-                "no-cycle-length",
-                new LabelLeftInputs(),
-                new LifeTable(),
-                new ParameterTable(),
-                new ArmSheets(),
-                new ResultsSheet())
-            .cycle(CycleInput.ABSENT));
+        of("wide-table", new WideTableInputs(), new ArmSheets()),
+        of("label-right", new LabelRightInputs(), new AcrossTraces("trace", 0)),
+        of("names", new NamedInputs(), new ArmSheets()).cycle(CycleInput.YEARS),
+        of("lookup", new LookupInputs(), new AcrossTraces("Markov", 0)),
+        of("no-cycle-length", new LabelLeftInputs(), new ArmSheets()).cycle(CycleInput.ABSENT),
+        of("inverse-cycle", new WideTableInputs(), new ColumnNameTraces())
+            .cycle(CycleInput.PER_YEAR),
+        of("section-units", new SectionUnitInputs(), new ArmSheets()),
+        of("heading-above", new HeadingAboveInputs(), new ArmSheets()),
+        of("values-first", new ValueFirstInputs(), new ColumnNameTraces()),
+        of("scenarios", new ScenarioInputs(), new ArmSheets()),
+        of("index-match", new IndexMatchInputs(), new ArmSheets()),
+        of("structured-table", new TableInputs(), new AcrossTraces("Engine", 2)),
+        of("matrices", new WideTableInputs(), new MatrixTraces()).constantOnly(),
+        of("column-names", new NamedInputs(), new ColumnNameTraces()),
+        oneSheet());
+  }
+
+  /** Inputs, parameters, results and traces on one sheet. */
+  private static Layout oneSheet() {
+    return Layout.of(
+        "one-sheet",
+        new OneSheetInputs(),
+        new LifeTable(),
+        new ParameterTable("Model", 2, 5),
+        new AcrossTraces("Model", 60),
+        new ResultsSheet("Model", 40, 5));
+  }
+
+  private static Layout of(String name, Placement inputs, Placement traces) {
+    return Layout.of(
+        name,
+        inputs,
+        new LifeTable(),
+        new ParameterTable(),
+        traces,
+        new ResultsSheet(),
+        new SoundForms());
   }
 }

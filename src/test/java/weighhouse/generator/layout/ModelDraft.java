@@ -100,17 +100,21 @@ public final class ModelDraft {
   }
 
   /** Template of a step along the cycles: its own places become lines of the trace. */
-  public String bindLine(Event event, String template) {
+  public String bindLine(Event event, String template, int arm) {
     return replace(
         model.cycleInput().fill(template, model.unit()),
         (own, name) -> {
           if (own || name.equals("p0") || name.equals("S0")) {
-            return "@" + event.symbol(name);
+            return name.endsWith("Adj") ? event.symbol(name, arm) : "@" + event.symbol(name);
           }
           return switch (name) {
             case "t" -> "@time";
             case "t0" -> "<time";
             case "qx" -> "@qx";
+            case "S0prev" -> "<" + event.symbol("S0");
+            case "Sprev" -> "<" + event.symbol("S");
+            case "OS0" -> "@os.S0";
+            case "OS" -> "@os.S";
             default -> OWN_INPUTS.contains(name) ? event.symbol(name) : name;
           };
         });

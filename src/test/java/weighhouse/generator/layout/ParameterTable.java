@@ -1,6 +1,5 @@
 package weighhouse.generator.layout;
 
-import java.util.List;
 import java.util.stream.Stream;
 import weighhouse.generator.book.SheetDraft;
 import weighhouse.generator.model.Event;
@@ -26,10 +25,9 @@ final class ParameterTable implements Placement {
 
   @Override
   public void place(ModelDraft draft) {
-    List<Event> events = draft.model().scalars();
     SheetDraft sheet = draft.book().sheet(draft.words().of(sheetKey)).at(row, column);
     sheet.label("").labels(draft.words().arm(0), draft.words().arm(1)).down();
-    for (Event event : events) {
+    for (Event event : draft.model().events()) {
       event.form().before().forEach(step -> row(draft, sheet, event, step, true, false));
       boolean both = event.inBothArms();
       event.form().applied().forEach(step -> row(draft, sheet, event, step, both, true));
@@ -38,6 +36,9 @@ final class ParameterTable implements Placement {
 
   private static void row(
       ModelDraft draft, SheetDraft sheet, Event event, Step step, boolean first, boolean second) {
+    if (event.form().basis().alongCycles() && !step.isScalar()) {
+      return;
+    }
     sheet.label(draft.words().of("step." + step.name(), event.label()));
     for (int arm : Stream.of(first ? 0 : -1, second ? 1 : -1).toList()) {
       if (arm < 0) {

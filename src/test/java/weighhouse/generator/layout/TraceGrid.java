@@ -58,6 +58,10 @@ final class TraceGrid {
     SheetDraft at = cell(position.get(line.key()), cycle);
     if (text.matches("[0-9.]+")) {
       at.value(Double.parseDouble(text));
+    } else if (text.startsWith("array:")) {
+      int colon = text.indexOf(':', 6);
+      at.array(
+          resolve(text.substring(colon + 1), cycle), 1, Integer.parseInt(text.substring(6, colon)));
     } else {
       at.formula(resolve(text, cycle));
     }

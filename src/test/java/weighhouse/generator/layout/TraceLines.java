@@ -30,7 +30,11 @@ final class TraceLines {
     TraceLines trace = new TraceLines(draft, arm);
     trace.time();
     trace.steps();
-    trace.states();
+    if (draft.model().isPartitioned()) {
+      trace.partition();
+    } else {
+      trace.states();
+    }
     trace.results();
     return trace.lines;
   }
@@ -59,10 +63,21 @@ final class TraceLines {
   }
 
   private void step(Event event, Step step) {
-    String next = draft.bindLine(event, event.template(step, arm, draft.faulty()));
+    if (step.isScalar()) {
+      return;
+    }
+    String next = draft.bindLine(event, event.template(step, arm, draft.faulty()), arm);
     String label = words.of("step." + step.name(), event.label());
     String root = event.isRoot(step) ? event.key() : null;
-    lines.add(new Line(event.symbol(step.name()), label, null, next, root));
+    lines.add(new Line(event.symbol(step.name()), label, first(event, next), next, root));
+  }
+
+  /** Curves begin at 1; whatever looks back begins with a number. */
+  private static String first(Event event, String next) {
+    if (!event.form().basis().isCurve()) {
+      return null;
+    }
+    return next.contains("{<") ? "1" : next;
   }
 
   /** What a probability is called in the formulas of this arm. */
@@ -90,6 +105,24 @@ final class TraceLines {
     add("s" + living, words.of("row.dead"), "0", dead);
     String all = sum("@", "", 1);
     add("sum", words.of("row.sum"), all, all);
+  }
+
+  /** States as areas between the curves. */
+  private void partition() {
+    List<String> living = model.scenario().living();
+    String os =
+        "{@" + model.event("os").symbol(model.event("os").isAffected(arm) ? "S" : "S0") + "}";
+    String pfs =
+        "{@" + model.event("pfs").symbol(model.event("pfs").isAffected(arm) ? "S" : "S0") + "}";
+    twice("s0", living.get(0), pfs);
+    twice("s1", living.get(1), os + "-" + pfs);
+    twice("s2", words.of("row.dead"), "1-" + os);
+    String all = sum("@", "", 1);
+    add("sum", words.of("row.sum"), all, all);
+  }
+
+  private void twice(String key, String label, String formula) {
+    add(key, label, formula, formula);
   }
 
   /** Sum over living states, each times a symbol; the last {@code more} states beyond them too. */

@@ -20,7 +20,7 @@ public enum Basis {
   /** S = exp(-lambda t^gamma). */
   WEIBULL_RATE("EXP(-{lambda}*{t}^{gamma})"),
   /** S = exp(-(t/scale)^shape). */
-  WEIBULL_SCALE("EXP(-({t}/{scale})^{shape})"),
+  WEIBULL_SCALE("EXP(-(({t}/{scale})^{shape}))"),
   EXPONENTIAL("EXP(-{lambda}*{t})"),
   GOMPERTZ("EXP(-({lambda}/{gamma})*(EXP({gamma}*{t})-1))"),
   LOG_NORMAL("IF({t}=0,1,1-NORMSDIST((LN({t})-{mu})/{sigma}))"),

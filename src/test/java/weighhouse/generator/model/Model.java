@@ -12,6 +12,12 @@ public record Model(
     List<Event> events,
     List<Input> inputs) {
 
+  /** The same without an input. */
+  public Model without(String symbol) {
+    List<Input> left = inputs.stream().filter(it -> !it.symbol().equals(symbol)).toList();
+    return new Model(scenario, unit, cycleInput, cycles, events, left);
+  }
+
   /** The words of its cells. */
   public Words words() {
     return scenario.words();
@@ -23,6 +29,11 @@ public record Model(
         .filter(event -> event.key().equals(key))
         .findFirst()
         .orElseThrow(() -> new NoSuchElementException(key));
+  }
+
+  /** Whether states are areas between survival curves. */
+  public boolean isPartitioned() {
+    return events.stream().anyMatch(event -> event.key().equals("os"));
   }
 
   /** Events laid out as scalars. */

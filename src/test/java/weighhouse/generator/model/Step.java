@@ -18,6 +18,11 @@ public record Step(String name, String right, String wrong) {
     return new Step(name, right, wrong);
   }
 
+  /** Whether it is one cell even where the event runs along the cycles: an adjusted parameter. */
+  public boolean isScalar() {
+    return name.endsWith("Adj");
+  }
+
   /** The formula of the faulty workbook or of its twin. */
   public String formula(boolean faulty) {
     return faulty && wrong != null ? wrong : right;

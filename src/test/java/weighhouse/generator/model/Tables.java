@@ -10,12 +10,13 @@ import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 
 /** The generator's tables of words: lines of fields between bars, {@code #} begins a comment. */
-final class Tables {
+public final class Tables {
   private static final Map<String, List<List<String>>> READ = new ConcurrentHashMap<>();
 
   private Tables() {}
 
-  static List<List<String>> rows(String table) {
+  /** Rows of a table. */
+  public static List<List<String>> rows(String table) {
     return READ.computeIfAbsent(table, Tables::read);
   }
 
