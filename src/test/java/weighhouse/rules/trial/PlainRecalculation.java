@@ -66,6 +66,11 @@ record PlainRecalculation(Workbook workbook, Shapes shapes, ModelScope cells)
   }
 
   @Override
+  public Values draw(long seed, Change change) {
+    throw new UnsupportedOperationException();
+  }
+
+  @Override
   public List<CellRange> dependents(Set<CellAddress> cells) {
     return List.of();
   }
