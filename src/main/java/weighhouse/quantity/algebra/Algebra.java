@@ -56,8 +56,7 @@ public final class Algebra {
     Term operand = term(unary.operand(), host, depth);
     return switch (unary.op()) {
       case MINUS -> operand.negated();
-      case PERCENT ->
-          operand.literal() ? Term.number(operand.value() / 100) : operand.moved();
+      case PERCENT -> operand.literal() ? Term.number(operand.value() / 100) : operand.moved();
       default -> operand;
     };
   }
@@ -84,7 +83,9 @@ public final class Algebra {
 
   private static Term difference(Expr.Binary binary, Term a, Term b) {
     boolean curves = a.is(Kind.SURVIVAL) && b.is(Kind.SURVIVAL);
-    if (curves && binary.left() instanceof Expr.CellRef l && binary.right() instanceof Expr.CellRef r) {
+    if (curves
+        && binary.left() instanceof Expr.CellRef l
+        && binary.right() instanceof Expr.CellRef r) {
       boolean sameMoment = l.row().equals(r.row()) != l.column().equals(r.column());
       boolean acrossCurves = sameMoment && l.row().equals(r.row()) && l.row().value() == 0;
       return Term.of(acrossCurves ? Kind.OCCUPANCY : Kind.PROBABILITY);
@@ -118,9 +119,7 @@ public final class Algebra {
   Term reference(Expr node, CellAddress host) {
     Optional<CellRange> cells = operands.cells(node, host);
     if (cells.isEmpty()) {
-      return node instanceof Expr.NameRef name
-          ? Term.of(operands.named(name, host))
-          : Term.UNKNOWN;
+      return node instanceof Expr.NameRef name ? Term.of(operands.named(name, host)) : Term.UNKNOWN;
     }
     CellRange range = cells.get();
     Quantity quantity = operands.quantity(range);

@@ -156,7 +156,10 @@ public final class Demands {
     for (Expr factor : Parts.factors(node)) {
       Term term = algebra.term(factor, host, 0);
       boolean modifies =
-          term.literal() || term.in(Kinds.RATIOS) || term.in(Kinds.REDUCTIONS) || term.in(Kinds.LOGS);
+          term.literal()
+              || term.in(Kinds.RATIOS)
+              || term.in(Kinds.REDUCTIONS)
+              || term.in(Kinds.LOGS);
       if (!modifies) {
         if (open != null) {
           return;

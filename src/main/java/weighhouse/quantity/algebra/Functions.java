@@ -36,11 +36,15 @@ final class Functions {
     }
 
     Term term(int index) {
-      return index < count() ? algebra.term(call.arguments().get(index), host, depth) : Term.UNKNOWN;
+      return index < count()
+          ? algebra.term(call.arguments().get(index), host, depth)
+          : Term.UNKNOWN;
     }
 
     List<Term> from(int first, int step) {
-      return IntStream.iterate(first, i -> i < count(), i -> i + step).mapToObj(this::term).toList();
+      return IntStream.iterate(first, i -> i < count(), i -> i + step)
+          .mapToObj(this::term)
+          .toList();
     }
 
     /** The cells that the whole call picks by a literal key, else what it may pick from. */
@@ -98,7 +102,8 @@ final class Functions {
     rules.put("LOG10", a -> Powers.ln(a.term(0)));
     rules.put("POWER", a -> Powers.power(a.term(0), a.term(1)));
     rules.put("SQRT", a -> Powers.power(a.term(0), Term.number(0.5)));
-    rules.put("PRODUCT", a -> a.from(0, 1).stream().reduce(Products::multiply).orElse(Term.UNKNOWN));
+    rules.put(
+        "PRODUCT", a -> a.from(0, 1).stream().reduce(Products::multiply).orElse(Term.UNKNOWN));
     rules.put("SUM", a -> a.from(0, 1).stream().reduce(Sums::add).orElse(Term.UNKNOWN).moved());
     rules.put("SUMPRODUCT", this::sumProduct);
     rules.put("MMULT", a -> matrixProduct(a.term(0), a.term(1)));
@@ -141,8 +146,7 @@ final class Functions {
     List.of("NORM.INV", "NORMINV")
         .forEach(name -> rules.put(name, a -> quantile(a.term(0), a.term(1))));
     List.of("LOGNORM.INV", "LOGINV")
-        .forEach(
-            name -> rules.put(name, a -> quantile(a.term(0), logNormal(a.term(1)))));
+        .forEach(name -> rules.put(name, a -> quantile(a.term(0), logNormal(a.term(1)))));
     List.of("BETA.INV", "BETAINV").forEach(name -> rules.put(name, a -> drawn(a, Kind.UNKNOWN)));
     List.of("GAMMA.INV", "GAMMAINV").forEach(name -> rules.put(name, a -> drawn(a, Kind.UNKNOWN)));
     List.of("WEIBULL.DIST", "WEIBULL", "EXPON.DIST", "EXPONDIST", "LOGNORM.DIST", "LOGNORMDIST")

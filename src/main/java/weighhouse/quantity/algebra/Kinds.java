@@ -18,8 +18,7 @@ public final class Kinds {
 
   /** What a ratio may be applied to. */
   public static final Set<Kind> RISKS =
-      EnumSet.of(
-          Kind.PROBABILITY, Kind.RATE, Kind.CUMULATIVE_HAZARD, Kind.SURVIVAL, Kind.ODDS);
+      EnumSet.of(Kind.PROBABILITY, Kind.RATE, Kind.CUMULATIVE_HAZARD, Kind.SURVIVAL, Kind.ODDS);
 
   static final Set<Kind> TIMES =
       EnumSet.of(Kind.TIME, Kind.CYCLE_LENGTH, Kind.COUNT, Kind.AGE, Kind.SURVIVAL_TIME);

@@ -61,7 +61,9 @@ final class Parts {
     return inner;
   }
 
-  /** What is subtracted from 1, in {@code 1-x} or {@code 1-x-y}; null if the node is nothing such. */
+  /**
+   * What is subtracted from 1, in {@code 1-x} or {@code 1-x-y}; null if the node is nothing such.
+   */
   static List<Expr> takenFromOne(Expr node) {
     Expr inner = Trees.inside(node);
     if (!(inner instanceof Expr.Binary difference) || difference.op() != BinaryOp.SUBTRACT) {

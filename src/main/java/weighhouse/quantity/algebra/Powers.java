@@ -60,8 +60,7 @@ final class Powers {
       return Term.number(Math.log(term.value()));
     } else if (term.in(Kinds.RATIOS)) {
       return term.as(Kinds.logOf(term.kind()));
-    } else if (term.is(Kind.SURVIVAL)
-        || (term.is(Kind.PROBABILITY) && term.is(Form.COMPLEMENT))) {
+    } else if (term.is(Kind.SURVIVAL) || (term.is(Kind.PROBABILITY) && term.is(Form.COMPLEMENT))) {
       return Term.of(Kind.CUMULATIVE_HAZARD, term.span()).as(Form.NEGATIVE);
     } else if (term.is(Form.DECAY)) {
       return Term.UNKNOWN;

@@ -88,10 +88,7 @@ final class Products {
 
   private static Term utility(Term b) {
     boolean lived =
-        b.in(Kinds.TIMES)
-            || b.is(Kind.OCCUPANCY)
-            || b.is(Kind.SURVIVAL)
-            || b.is(Kind.LIFE_YEARS);
+        b.in(Kinds.TIMES) || b.is(Kind.OCCUPANCY) || b.is(Kind.SURVIVAL) || b.is(Kind.LIFE_YEARS);
     return Term.of(lived ? Kind.QALY : Kind.UTILITY);
   }
 

@@ -98,8 +98,8 @@ final class Sums {
   }
 
   private static Term withRole(Term sum, Term a, Term b) {
-    Role role = a.quantity().role() == Role.STANDARD_ERROR ? b.quantity().role() : a.quantity().role();
-    return new Term(
-        new Quantity(sum.kind(), role, sum.span()), sum.form(), Double.NaN, false);
+    Role role =
+        a.quantity().role() == Role.STANDARD_ERROR ? b.quantity().role() : a.quantity().role();
+    return new Term(new Quantity(sum.kind(), role, sum.span()), sum.form(), Double.NaN, false);
   }
 }

@@ -95,6 +95,8 @@ final class Cycles {
 
   /** Larger numbers without a unit: days of a week, of four weeks, of a month. */
   private static double unitless(double number) {
-    return number >= 7 && number <= 366 && number != 12 ? number * TimeUnit.DAY.years() : Double.NaN;
+    return number >= 7 && number <= 366 && number != 12
+        ? number * TimeUnit.DAY.years()
+        : Double.NaN;
   }
 }

@@ -26,8 +26,7 @@ final class Evidence {
     Evidence evidence = new Evidence(workbook, unit);
     evidence.gather();
     Basis basis = unit.verdict.source().basis();
-    return new Inferred(
-        unit.quantity(), basis, evidence.agreeing, evidence.contradicting);
+    return new Inferred(unit.quantity(), basis, evidence.agreeing, evidence.contradicting);
   }
 
   private void gather() {

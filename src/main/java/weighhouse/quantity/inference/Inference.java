@@ -84,8 +84,7 @@ public final class Inference {
     }
     Cycles cycles = new Cycles(workbook, units, vocabulary, numbers, declarations);
     Outcomes outcomes = new Outcomes(units, links, labels, vocabulary);
-    return new InferredQuantities(
-        workbook, units, algebra, labels, cycles.find(), outcomes, model);
+    return new InferredQuantities(workbook, units, algebra, labels, cycles.find(), outcomes, model);
   }
 
   private void declare() {

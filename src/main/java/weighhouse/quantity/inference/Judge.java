@@ -65,7 +65,9 @@ final class Judge {
     return guess.known() ? Source.LABEL : Source.NONE;
   }
 
-  /** A label of that very number, in words that mean it. A section's title gives way to a formula. */
+  /**
+   * A label of that very number, in words that mean it. A section's title gives way to a formula.
+   */
   private static boolean isDecisive(Guess guess, boolean formula) {
     return guess.known(Strength.CLEAR) && !(formula && guess.remote());
   }

@@ -40,7 +40,8 @@ final class Links {
     }
     for (Expr node : Trees.walk(unit.tree)) {
       if (node instanceof Expr.Call call) {
-        looked(call, unit.host()).ifPresent(r -> units.in(r, MOST_READ).forEach(u -> read.add(u.id)));
+        looked(call, unit.host())
+            .ifPresent(r -> units.in(r, MOST_READ).forEach(u -> read.add(u.id)));
       }
     }
     read.forEach(id -> dependents[id] = with(dependents[id], unit.id));

@@ -74,9 +74,7 @@ final class Lookups {
   }
 
   private Optional<CellRange> area(List<Expr> arguments, int index, CellAddress host) {
-    return index < arguments.size()
-        ? resolver.range(arguments.get(index), host)
-        : Optional.empty();
+    return index < arguments.size() ? resolver.range(arguments.get(index), host) : Optional.empty();
   }
 
   /** One column (or row) of a range, counted from 0. */

@@ -84,8 +84,7 @@ final class Outcomes {
   }
 
   private static boolean isCopy(Unit unit) {
-    return unit.tree instanceof Expr.CellRef
-        || unit.tree instanceof Expr.NameRef;
+    return unit.tree instanceof Expr.CellRef || unit.tree instanceof Expr.NameRef;
   }
 
   /** The willingness to pay, a typed-in number. */

@@ -55,8 +55,7 @@ final class Splitter {
       CellAddress first = lines.later(unit.host(), starts.get(i));
       CellAddress last = lines.later(unit.host(), end - 1);
       CellRange range =
-          new CellRange(
-              first.sheet(), first.row(), first.column(), last.row(), last.column());
+          new CellRange(first.sheet(), first.row(), first.column(), last.row(), last.column());
       Unit part = units.add(range, unit.tree);
       part.structural = unit.structural;
       part.structure = unit.structure;

@@ -80,7 +80,9 @@ final class Traces {
             : a.range.firstColumn() == b.range.firstColumn());
   }
 
-  /** Whether the formula multiplies what stands in its own line or a neighbour's one cycle before. */
+  /**
+   * Whether the formula multiplies what stands in its own line or a neighbour's one cycle before.
+   */
   private static boolean carriesOn(Unit unit, Lines lines) {
     List<Expr> nodes = Trees.walk(unit.tree);
     boolean before = nodes.stream().anyMatch(node -> isBefore(node, lines));
@@ -123,8 +125,7 @@ final class Traces {
   }
 
   private boolean moves(List<Unit> window, Lines lines, int last) {
-    return window.stream()
-        .anyMatch(u -> !near(number(u, lines, 0), number(u, lines, last)));
+    return window.stream().anyMatch(u -> !near(number(u, lines, 0), number(u, lines, last)));
   }
 
   /** Whether the cycle before the first has the whole cohort in one state. */

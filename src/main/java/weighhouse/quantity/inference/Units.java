@@ -101,8 +101,7 @@ final class Units {
     int lastColumn = Math.min(range.lastColumn(), cells.columns() - 1);
     return lastRow < range.firstRow() || lastColumn < range.firstColumn()
         ? null
-        : new CellRange(
-            range.sheet(), range.firstRow(), range.firstColumn(), lastRow, lastColumn);
+        : new CellRange(range.sheet(), range.firstRow(), range.firstColumn(), lastRow, lastColumn);
   }
 
   /** The units with cells in a range, each once, up to a number of them. */

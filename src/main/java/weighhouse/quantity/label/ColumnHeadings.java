@@ -2,7 +2,9 @@ package weighhouse.quantity.label;
 
 import java.util.function.IntConsumer;
 
-/** Finds the headings of a number's column: the nearest texts above, over numbers and blank rows. */
+/**
+ * Finds the headings of a number's column: the nearest texts above, over numbers and blank rows.
+ */
 final class ColumnHeadings {
   /** Blank rows between a heading and the first number under it. */
   private static final int MOST_BLANKS = 3;

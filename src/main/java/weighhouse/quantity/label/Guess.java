@@ -15,8 +15,7 @@ import weighhouse.quantity.vocabulary.Strength;
  * @param labels the texts that decided, the most telling first
  */
 public record Guess(Quantity quantity, Strength strength, boolean parameter, List<Label> labels) {
-  public static final Guess NONE =
-      new Guess(Quantity.UNKNOWN, Strength.WEAK, false, List.of());
+  public static final Guess NONE = new Guess(Quantity.UNKNOWN, Strength.WEAK, false, List.of());
 
   public Kind kind() {
     return quantity.kind();

@@ -54,7 +54,8 @@ public final class Headings {
     boolean twice =
         place == Place.SECTION
             && found.stream()
-                .anyMatch(l -> l.where() != null && l.where().row() == row && l.place() == Place.ABOVE);
+                .anyMatch(
+                    l -> l.where() != null && l.where().row() == row && l.place() == Place.ABOVE);
     if (text != null && !twice) {
       CellAddress where = new CellAddress(sheet, row, column);
       found.add(new Label(text, place, where, vocabulary.read(text)));
@@ -69,9 +70,7 @@ public final class Headings {
     SheetTexts texts = sheets.get(cell.sheet());
     boolean[] tells = new boolean[1];
     new RowLabels(texts, cell.row(), cell.column())
-        .find(
-            (place, column) ->
-                tells[0] |= vocabulary.read(texts.at(cell.row(), column)).tells());
+        .find((place, column) -> tells[0] |= vocabulary.read(texts.at(cell.row(), column)).tells());
     return tells[0];
   }
 

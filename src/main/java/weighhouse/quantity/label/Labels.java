@@ -20,8 +20,7 @@ public final class Labels {
   /** Effect measures are told by the heading of their column as well as by the row's label. */
   private static final int MEASURE = 3;
 
-  private static final Set<Kind> MEASURES =
-      EnumSet.range(Kind.HAZARD_RATIO, Kind.LOG_ODDS_RATIO);
+  private static final Set<Kind> MEASURES = EnumSet.range(Kind.HAZARD_RATIO, Kind.LOG_ODDS_RATIO);
 
   private static final Set<Kind> BETWEEN_0_AND_1 =
       EnumSet.of(Kind.PROBABILITY, Kind.SURVIVAL, Kind.PROPORTION, Kind.OCCUPANCY);
@@ -148,7 +147,8 @@ public final class Labels {
         .filter(label -> label.place() == Place.ABOVE)
         .findFirst()
         .map(label -> label.reading())
-        .filter(r -> r.senses().isEmpty() && r.figure() != null && r.figure().role() == Role.ESTIMATE)
+        .filter(
+            r -> r.senses().isEmpty() && r.figure() != null && r.figure().role() == Role.ESTIMATE)
         .isPresent();
   }
 

@@ -64,7 +64,8 @@ final class SenseWords {
     }
     boolean sure = sense.strength().atLeast(Strength.CLEAR);
     if (sense.kind() == Kind.RATE && timing.rated()) {
-      return sense.as(timing.personTime() ? Strength.EXPLICIT : sure ? sense.strength() : Strength.CLEAR);
+      return sense.as(
+          timing.personTime() ? Strength.EXPLICIT : sure ? sense.strength() : Strength.CLEAR);
     } else if (sense.kind() == Kind.PROBABILITY && timing.personTime() && !sure) {
       return new Sense(Kind.RATE, Strength.CLEAR, sense.words());
     } else if (sense.kind() == Kind.PROBABILITY && sense.strength() == Strength.FAIR) {

@@ -50,7 +50,9 @@ final class SpanWords {
     return false;
   }
 
-  /** The length of time that the words name, or null; the model's own cycle only as a last resort. */
+  /**
+   * The length of time that the words name, or null; the model's own cycle only as a last resort.
+   */
   Timing read(List<Token> words) {
     Timing cycle = null;
     double people = denominator(words);

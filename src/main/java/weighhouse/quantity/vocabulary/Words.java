@@ -48,8 +48,10 @@ final class Words {
       if (word.equals("k") && last >= 0 && tokens.get(last).isNumber()) {
         tokens.set(last, new Token(tokens.get(last).word() + "000", false));
       } else {
-        tokens.add(new Token(stem(word.replace(',', word.length() > 1 ? '.' : ',')),
-            !shouted && isCapitals(word)));
+        tokens.add(
+            new Token(
+                stem(word.replace(',', word.length() > 1 ? '.' : ',')),
+                !shouted && isCapitals(word)));
       }
     }
     return tokens;
@@ -67,7 +69,10 @@ final class Words {
   /** Lower case without the s of most plurals. */
   static String stem(String word) {
     String lower = word.toLowerCase(Locale.ROOT);
-    if (lower.length() <= 3 || lower.endsWith("ss") || lower.endsWith("us") || lower.endsWith("is")) {
+    if (lower.length() <= 3
+        || lower.endsWith("ss")
+        || lower.endsWith("us")
+        || lower.endsWith("is")) {
       return lower;
     } else if (lower.endsWith("ies")) {
       return lower.substring(0, lower.length() - 3) + "y";
