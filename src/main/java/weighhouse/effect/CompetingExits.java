@@ -7,8 +7,8 @@ import java.util.Arrays;
  * over the cycle or in constant proportion to the others. No way back within the cycle is counted;
  * for that use the exponential of the generator in {@code effect.matrix}.
  *
- * <p>Rows that cannot be read give NaN in every entry. Source: graves-2021; jones-epstein-garcia-
- * mochon-2017 for chains.
+ * <p>Rows that cannot be read give NaN in every entry. Sources: graves-2021; for chains
+ * jones-epstein-garcia-mochon-2017.
  */
 public final class CompetingExits {
   private CompetingExits() {}
