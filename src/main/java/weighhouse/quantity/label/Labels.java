@@ -22,6 +22,19 @@ public final class Labels {
 
   private static final Set<Kind> MEASURES = EnumSet.range(Kind.HAZARD_RATIO, Kind.LOG_ODDS_RATIO);
 
+  /** A row of these is no effect measure, whatever the heading of its column says. */
+  private static final Set<Kind> THINGS =
+      EnumSet.of(
+          Kind.COST,
+          Kind.UTILITY,
+          Kind.LIFE_YEARS,
+          Kind.QALY,
+          Kind.ICER,
+          Kind.NET_BENEFIT,
+          Kind.THRESHOLD,
+          Kind.DISCOUNT_RATE,
+          Kind.AGE);
+
   private static final Set<Kind> BETWEEN_0_AND_1 =
       EnumSet.of(Kind.PROBABILITY, Kind.SURVIVAL, Kind.PROPORTION, Kind.OCCUPANCY);
 
@@ -45,10 +58,15 @@ public final class Labels {
   private static Guess weigh(List<Label> labels, double number) {
     Candidate best = null;
     boolean parameter = false;
+    boolean thing = isThing(labels);
     for (Label label : labels) {
       parameter |= isParameter(label, labels);
+      if (isOfAnotherSection(label, labels)) {
+        continue;
+      }
+      int bonus = thing && label.place() == Place.ABOVE ? 0 : MEASURE;
       for (Sense sense : label.reading().senses()) {
-        Candidate candidate = candidate(label, sense, number);
+        Candidate candidate = candidate(label, sense, number, bonus);
         if (candidate != null && (best == null || candidate.score() > best.score())) {
           best = candidate;
         }
@@ -62,13 +80,33 @@ public final class Labels {
     return new Guess(quantity, best.strength(), false, evidence(best, labels));
   }
 
-  private static Candidate candidate(Label label, Sense sense, double number) {
+  /** Whether the row's own label names a thing of the model that is no risk. */
+  private static boolean isThing(List<Label> labels) {
+    return labels.stream()
+        .filter(label -> label.place() == Place.LEFT || label.place() == Place.RIGHT)
+        .flatMap(label -> label.reading().senses().stream())
+        .anyMatch(sense -> THINGS.contains(sense.kind()));
+  }
+
+  /**
+   * Whether the title of a section of other things stands between the column's heading and the
+   * number.
+   */
+  private static boolean isOfAnotherSection(Label label, List<Label> labels) {
+    return label.place() == Place.ABOVE
+        && labels.stream()
+            .filter(l -> l.place() == Place.SECTION && l.where() != null)
+            .filter(l -> !l.reading().senses().isEmpty())
+            .anyMatch(section -> section.where().row() > label.where().row());
+  }
+
+  private static Candidate candidate(Label label, Sense sense, double number, int measureBonus) {
     int level = sense.strength().level() - label.place().discount();
     if (level < 0 || !fits(sense, number)) {
       return null;
     }
     boolean near = label.place().remoteness() <= Place.DESCRIPTION.remoteness();
-    int bonus = near && MEASURES.contains(sense.kind()) ? MEASURE : 0;
+    int bonus = near && MEASURES.contains(sense.kind()) ? measureBonus : 0;
     int score = level * STEP + bonus - label.place().remoteness();
     return new Candidate(label, sense.kind(), Strength.ofLevel(level), score);
   }
