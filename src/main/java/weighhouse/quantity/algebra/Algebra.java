@@ -23,10 +23,10 @@ public final class Algebra {
     this.operands = operands;
   }
 
-  /** The quantity of an expression in a cell. */
+  /** The quantity of an expression in a cell; minus a hazard, say, is none. */
   public Quantity quantity(Expr expression, CellAddress host) {
     Term term = term(expression, host, 0);
-    return term.isUnknown() || term.literal()
+    return term.isUnknown() || term.literal() || term.is(Form.NEGATIVE)
         ? new Quantity(Kind.UNKNOWN, term.quantity().role(), null)
         : term.quantity();
   }
