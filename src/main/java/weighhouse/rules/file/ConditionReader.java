@@ -8,6 +8,7 @@ import java.util.regex.Pattern;
 import weighhouse.rules.pattern.Condition;
 import weighhouse.rules.pattern.FixedCondition;
 import weighhouse.rules.pattern.IncludesCondition;
+import weighhouse.rules.pattern.PlainCondition;
 import weighhouse.rules.pattern.SpanCondition;
 import weighhouse.rules.pattern.ValueCondition;
 
@@ -46,6 +47,9 @@ final class ConditionReader {
     }
     if ("true".equals(fields.optional("fixed"))) {
       conditions.add(new FixedCondition());
+    }
+    if ("true".equals(fields.optional("plain"))) {
+      conditions.add(new PlainCondition());
     }
     return conditions;
   }

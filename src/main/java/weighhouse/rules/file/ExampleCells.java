@@ -19,7 +19,7 @@ import weighhouse.quantity.Span;
 final class ExampleCells {
   private static final Pattern FORM =
       Pattern.compile(
-          "(?<kind>[a-z][a-z ]*?)?(?: per (?<span>(?:[0-9.]+ )?[a-z-]+))?"
+          "(?<kind>cycles per year|[a-z][a-z ]*?)?(?: per (?<span>(?:[0-9.]+ )?[a-z-]+))?"
               + "(?: (?<role>lower limit|upper limit|draw))?"
               + " ?(?<content>=.*|'.*|-?[0-9][-+0-9.eE ]*)?");
 

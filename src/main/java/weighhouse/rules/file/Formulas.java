@@ -9,6 +9,7 @@ import weighhouse.formula.Expr;
 import weighhouse.formula.FormulaParser;
 import weighhouse.formula.FormulaSyntaxException;
 import weighhouse.formula.Trees;
+import weighhouse.rules.pattern.CyclesOf;
 import weighhouse.rules.pattern.Pattern;
 
 /** Patterns and corrections: formulas over declared metavariables. */
@@ -44,7 +45,8 @@ final class Formulas {
     }
     boolean sound = true;
     for (Expr node : Trees.walk(tree)) {
-      if (node instanceof Expr.NameRef name && !declared.contains(name.name())) {
+      if (node instanceof Expr.NameRef name
+          && !declared.contains(CyclesOf.metavariable(name.name()))) {
         faults.add(at, "metavariable '" + name.name() + "' is not declared under where");
         sound = false;
       } else if (node instanceof Expr.CellRef || node instanceof Expr.AreaRef) {

@@ -11,6 +11,7 @@ import org.snakeyaml.engine.v2.nodes.MappingNode;
 import org.snakeyaml.engine.v2.nodes.Node;
 import weighhouse.formula.Expr;
 import weighhouse.quantity.Kind;
+import weighhouse.rules.pattern.CyclesOf;
 import weighhouse.rules.pattern.Metavariable;
 import weighhouse.rules.pattern.Pattern;
 import weighhouse.rules.pattern.TypedPattern;
@@ -82,7 +83,11 @@ final class PatternReader {
   }
 
   private static Set<String> letters(Expr correction) {
-    return new LinkedHashSet<>(new Pattern("", correction).variables());
+    Set<String> letters = new LinkedHashSet<>();
+    new Pattern("", correction)
+        .variables()
+        .forEach(name -> letters.add(CyclesOf.metavariable(name)));
+    return letters;
   }
 
   private TypedPattern typed(Own own, List<Pattern> unless, Set<Kind> beside) {

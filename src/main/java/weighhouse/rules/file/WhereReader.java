@@ -18,7 +18,7 @@ final class WhereReader {
   static final String CELL = "cell";
 
   private static final Set<String> FIELDS =
-      Set.of("kind", "number", "joins", "span", "value", "includes", "fixed");
+      Set.of("kind", "number", "joins", "span", "value", "includes", "fixed", "plain");
 
   private final Faults faults;
   private final ConditionReader conditions;

@@ -69,11 +69,20 @@ final class Candidates {
       if (Chains.isProduct(node) && isTop(node)) {
         List<Factor> taken =
             Chains.factors(node).stream().filter(f -> takes(metavariable, f)).toList();
-        if (taken.size() > 1 || taken.stream().anyMatch(Factor::inverse)) {
+        if (isGroup(metavariable, taken)) {
           bounds.add(together(metavariable, taken));
         }
       }
     }
+  }
+
+  /**
+   * One factor alone is a term; a lone divisor is a group where reciprocals count, as of numbers.
+   */
+  private static boolean isGroup(Metavariable metavariable, List<Factor> taken) {
+    return taken.stream().anyMatch(factor -> !factor.inverse())
+        ? taken.size() > 1
+        : !taken.isEmpty() && !metavariable.numbers().isEmpty();
   }
 
   @SuppressWarnings("ReferenceEquality") // one very node

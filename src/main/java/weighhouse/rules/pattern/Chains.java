@@ -42,7 +42,7 @@ final class Chains {
       return binary.op() == BinaryOp.MULTIPLY || binary.op() == BinaryOp.DIVIDE;
     }
     return node instanceof Expr.Call call
-        && call.function().equals("PRODUCT")
+        && (call.function().equals("PRODUCT") || call.function().equals("SUMPRODUCT"))
         && call.arguments().stream().noneMatch(Chains::isArea);
   }
 
@@ -81,15 +81,24 @@ final class Chains {
         && (binary.op() == BinaryOp.ADD || binary.op() == BinaryOp.SUBTRACT);
   }
 
-  /** The whole product that a node is a factor of. */
+  /**
+   * The whole product that a node is a factor of; what a quotient is divided by is one of its own.
+   */
+  @SuppressWarnings("ReferenceEquality") // one very node
   static Expr product(Expr node, FormulaView view) {
     Expr top = node;
-    for (Expr up = node; up != null; up = view.parent(up)) {
-      if (isProduct(up)) {
+    Expr below = node;
+    for (Expr up = view.parent(node); up != null; up = view.parent(up)) {
+      boolean divisor =
+          up instanceof Expr.Binary binary
+              && binary.op() == BinaryOp.DIVIDE
+              && binary.right() == below;
+      if (isProduct(up) && !divisor) {
         top = up;
-      } else if (up != node && !(up instanceof Expr.Paren)) {
+      } else if (!(up instanceof Expr.Paren)) {
         break;
       }
+      below = up;
     }
     return top;
   }

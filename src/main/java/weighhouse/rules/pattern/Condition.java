@@ -2,7 +2,7 @@ package weighhouse.rules.pattern;
 
 /** What must hold of a metavariable beyond its kind. */
 public sealed interface Condition
-    permits SpanCondition, ValueCondition, IncludesCondition, FixedCondition {
+    permits SpanCondition, ValueCondition, IncludesCondition, FixedCondition, PlainCondition {
 
   /** Whether it holds of what the metavariable stands for; false where that cannot be told. */
   boolean holds(Bound bound, Situation situation);

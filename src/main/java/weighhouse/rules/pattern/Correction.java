@@ -25,6 +25,9 @@ final class Correction {
       Expr sum = Chains.sum(inside, reading.view());
       return new Site(sum, typed.pattern().isSum() ? List.of() : commonFactors(sum), false);
     }
+    if (typed.pattern().isSum()) {
+      return new Site(inside, List.of(), true);
+    }
     Expr product = Chains.product(inside, reading.view());
     return new Site(product, keptOf(product), true);
   }
@@ -50,7 +53,10 @@ final class Correction {
       return null;
     }
     Expr filled = Filling.fill(typed.correction(), reading);
-    Expr corrected = site.dropped() ? inProduct(site, filled) : inSum(site, filled);
+    Expr corrected = isPatternTimes(site.node(), List.of(), List.of(), false) ? filled : null;
+    if (corrected == null) {
+      corrected = site.dropped() ? inProduct(site, filled) : inSum(site, filled);
+    }
     return corrected == null ? null : Trees.replace(reading.view().tree(), site.node(), corrected);
   }
 
@@ -75,7 +81,10 @@ final class Correction {
   private Expr inSum(Site site, Expr filled) {
     List<Chains.Addend> addends = Chains.addends(site.node());
     List<Chains.Addend> kept = addends.stream().filter(this::stays).toList();
-    Chains.Addend first = addends.stream().filter(a -> !stays(a)).findFirst().orElseThrow();
+    Chains.Addend first = addends.stream().filter(a -> !stays(a)).findFirst().orElse(null);
+    if (first == null) {
+      return null;
+    }
     boolean negative = !typed.pattern().isSum() && first.negative();
     if (!isPatternTimes(site.node(), kept, site.kept(), negative)) {
       return null;

@@ -14,9 +14,17 @@ final class Filling {
   }
 
   private static Expr operand(Expr node, Reading reading) {
-    return node instanceof Expr.NameRef name && reading.binds(name.name())
-        ? reading.bound(name.name()).operand()
-        : null;
+    if (!(node instanceof Expr.NameRef name)) {
+      return null;
+    }
+    String metavariable = CyclesOf.metavariable(name.name());
+    if (!reading.binds(metavariable)) {
+      return null;
+    }
+    Bound bound = reading.bound(metavariable);
+    return CyclesOf.isOne(name.name())
+        ? CyclesOf.expression(bound, reading.view())
+        : bound.operand();
   }
 
   /** {@code 1-(1-x)} is x, {@code (x)} needs no parentheses where x is one reference or call. */

@@ -3,12 +3,13 @@ package weighhouse.rules.pattern;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import weighhouse.formula.Axis;
 import weighhouse.formula.Expr;
+import weighhouse.formula.ReferenceResolver;
 import weighhouse.formula.Shape;
 import weighhouse.formula.Shapes;
-import weighhouse.formula.SheetRef;
 import weighhouse.formula.Trees;
 import weighhouse.quantity.Kind;
 import weighhouse.quantity.Quantities;
@@ -32,14 +33,14 @@ public final class ModelScope implements Scope {
   private final Workbook workbook;
   private final Shapes shapes;
   private final Quantities quantities;
-  private final Names names;
+  private final ReferenceResolver references;
   private int depth;
 
   public ModelScope(Workbook workbook, Shapes shapes, Quantities quantities) {
     this.workbook = workbook;
     this.shapes = shapes;
     this.quantities = quantities;
-    this.names = new Names(workbook);
+    this.references = new ReferenceResolver(workbook);
   }
 
   public Workbook workbook() {
@@ -57,9 +58,9 @@ public final class ModelScope implements Scope {
       return cell(cell, translator);
     }
     if (reference instanceof Expr.NameRef name && depth < DEEPEST) {
-      Expr meaning = names.meaning(name, host);
-      if (meaning != null && !(meaning instanceof Expr.AreaRef)) {
-        return deeper(meaning, host, translator);
+      Optional<Expr> meaning = references.names().resolve(name, host.sheet());
+      if (meaning.isPresent() && references.range(meaning.get(), host).isEmpty()) {
+        return deeper(meaning.get(), host, translator);
       }
     }
     return translator.terms().symbol(new Place(reference, host));
@@ -74,57 +75,8 @@ public final class ModelScope implements Scope {
 
   /** The single cell that a reference or name means in the host; null where it means none. */
   public CellAddress cell(Expr reference, CellAddress host) {
-    Expr inside = Trees.inside(reference);
-    if (inside instanceof Expr.CellRef cell) {
-      int sheet = sheet(cell.sheet(), host);
-      return sheet < 0 ? null : at(sheet, cell.row(), cell.column(), host);
-    } else if (inside instanceof Expr.NameRef name) {
-      Expr meaning = names.meaning(name, host);
-      return meaning == null || meaning instanceof Expr.NameRef ? null : met(meaning, host);
-    }
-    return null;
-  }
-
-  private static CellAddress at(int sheet, Axis row, Axis column, CellAddress host) {
-    return new CellAddress(sheet, row.resolve(host.row()), column.resolve(host.column()));
-  }
-
-  /** The cell in which a name's column or row meets the host's row or column. */
-  private CellAddress met(Expr meaning, CellAddress host) {
-    if (meaning instanceof Expr.CellRef) {
-      return cell(meaning, host);
-    } else if (meaning instanceof Expr.ColumnsRef columns
-        && columns.first().equals(columns.last())) {
-      int sheet = sheet(columns.sheet(), host);
-      int column = columns.first().resolve(host.column());
-      return sheet < 0 ? null : new CellAddress(sheet, host.row(), column);
-    } else if (meaning instanceof Expr.AreaRef area) {
-      int sheet = sheet(area.sheet(), host);
-      CellAddress first = at(sheet, area.row1(), area.column1(), host);
-      CellAddress last = at(sheet, area.row2(), area.column2(), host);
-      return sheet < 0 ? null : met(first, last, host);
-    }
-    return null;
-  }
-
-  private static CellAddress met(CellAddress first, CellAddress last, CellAddress host) {
-    boolean inRows = host.row() >= first.row() && host.row() <= last.row();
-    boolean inColumns = host.column() >= first.column() && host.column() <= last.column();
-    if (first.column() == last.column() && inRows) {
-      return new CellAddress(first.sheet(), host.row(), first.column());
-    } else if (first.row() == last.row() && inColumns) {
-      return new CellAddress(first.sheet(), first.row(), host.column());
-    }
-    return null;
-  }
-
-  /** Index of a reference's sheet; negative where it is elsewhere or spans several. */
-  private int sheet(SheetRef sheet, CellAddress host) {
-    if (sheet == null) {
-      return host.sheet();
-    }
-    boolean here = sheet.workbook() == null && sheet.last() == null;
-    return here ? workbook.sheetIndex(sheet.first()) : -1;
+    boolean several = reference instanceof Expr.AreaRef || !Trees.children(reference).isEmpty();
+    return several ? null : references.cell(reference, host).orElse(null);
   }
 
   private Term cell(CellAddress cell, Translator translator) {

@@ -85,7 +85,7 @@ public final class PatternFinder {
         .anyMatch(
             pattern ->
                 pattern.variables().stream().allMatch(reading::binds)
-                    && !reading.smallest(pattern).isEmpty());
+                    && reading.holdsSomewhere(pattern, typed.pattern()));
   }
 
   /** The smallest nodes that are the pattern's function, unless a helper cell was it already. */

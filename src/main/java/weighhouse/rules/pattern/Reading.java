@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Set;
 import weighhouse.formula.Expr;
 import weighhouse.formula.Trees;
+import weighhouse.rules.term.Identity;
 import weighhouse.rules.term.Term;
 import weighhouse.rules.term.Terms;
 
@@ -84,6 +85,19 @@ final class Reading {
       }
     }
     return smallest;
+  }
+
+  /** Whether some node is the pattern's function, the other being what it may stand in. */
+  boolean holdsSomewhere(Pattern pattern, Pattern inner) {
+    double[] values = points.pattern(pattern);
+    boolean distinct = !Identity.affine(points.pattern(inner), values);
+    return view.nodes().stream()
+        .filter(this::depends)
+        .map(this::term)
+        .anyMatch(
+            term ->
+                points.equal(term, List.of(), List.of(), values)
+                    || (distinct && points.holds(term, values)));
   }
 
   private boolean is(Expr node, Pattern pattern, double[] values) {

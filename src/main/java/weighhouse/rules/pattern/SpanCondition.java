@@ -41,7 +41,7 @@ public record SpanCondition(Relation relation, String other) implements Conditio
     };
   }
 
-  private static double length(Iterable<Quantity> quantities, Cycle cycle) {
+  static double length(Iterable<Quantity> quantities, Cycle cycle) {
     for (Quantity quantity : quantities) {
       if (quantity.span() != null) {
         return years(quantity.span(), cycle);

@@ -20,6 +20,10 @@ final class FunctionAlgebra {
       case "SQRT" -> terms.power(argument(call, 0, translator), terms.number(0.5));
       case "POWER" -> terms.power(argument(call, 0, translator), argument(call, 1, translator));
       case "PRODUCT" -> fold(call, translator, terms::product);
+      case "SUMPRODUCT" ->
+          arguments.stream().allMatch(FunctionAlgebra::isSingle)
+              ? fold(call, translator, terms::product)
+              : opaque(call, translator);
       case "SUM" -> fold(call, translator, terms::sum);
       case "ABS" -> terms.apply(Operation.ABS, List.of(argument(call, 0, translator)));
       case "MIN" -> bounded(call, Operation.MIN, translator);
@@ -33,6 +37,12 @@ final class FunctionAlgebra {
       case "LET" -> let(arguments, translator);
       default -> opaque(call, translator);
     };
+  }
+
+  private static boolean isSingle(Expr argument) {
+    return !(argument instanceof Expr.AreaRef)
+        && !(argument instanceof Expr.ColumnsRef)
+        && !(argument instanceof Expr.RowsRef);
   }
 
   private static Term argument(Expr.Call call, int index, Translator translator) {
