@@ -2,6 +2,8 @@ package weighhouse.cli;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.LocalDate;
+import java.time.ZoneId;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -12,7 +14,9 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import weighhouse.audit.AuditResult;
 import weighhouse.audit.Brief;
+import weighhouse.audit.Finding;
 import weighhouse.audit.Gate;
+import weighhouse.audit.Lapsed;
 import weighhouse.report.IndexEntry;
 import weighhouse.report.format.Format;
 import weighhouse.report.text.Visible;
@@ -20,7 +24,7 @@ import weighhouse.workbook.UnreadableWorkbookException;
 
 /** Audits one workbook, or several side by side; a bad one does not stop the rest. */
 final class AuditRun {
-  private record Done(IndexEntry entry, int status, List<String> summary) {}
+  private record Done(IndexEntry entry, int status, List<String> summary, List<String> findings) {}
 
   private final Setting.Audits audits;
   private final Reports reports;
@@ -50,6 +54,9 @@ final class AuditRun {
     if (!quiet && firstPage != null && files.size() > 1) {
       console.say("All of them: " + Visible.text(firstPage.toString()));
     }
+    List<String> found = done.stream().flatMap(one -> one.findings().stream()).toList();
+    Lapsed.of(brief, found, LocalDate.now(ZoneId.systemDefault()))
+        .forEach(sentence -> console.complain(Visible.text(sentence)));
     return status;
   }
 
@@ -105,7 +112,8 @@ final class AuditRun {
       return new Done(
           IndexEntry.of(name, result, written),
           incomplete ? Status.INCOMPLETE : Status.PASS,
-          summary);
+          summary,
+          result.findings().stream().map(Finding::id).toList());
     } catch (UnreadableWorkbookException e) {
       return failed(name, e.getMessage());
     } catch (IOException e) {
@@ -116,6 +124,6 @@ final class AuditRun {
   }
 
   private static Done failed(String name, String problem) {
-    return new Done(IndexEntry.failed(name, problem), Status.UNUSABLE, List.of());
+    return new Done(IndexEntry.failed(name, problem), Status.UNUSABLE, List.of(), List.of());
   }
 }

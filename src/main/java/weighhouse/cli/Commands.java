@@ -13,6 +13,10 @@ final class Commands {
   static {
     ALL.put("audit", AuditCommand::new);
     ALL.put("gate", GateCommand::new);
+    ALL.put("correct", CorrectCommand::new);
+    ALL.put("compare", CompareCommand::new);
+    ALL.put("draft", DraftCommand::new);
+    ALL.put("rules", RulesCommand::new);
   }
 
   private Commands() {}

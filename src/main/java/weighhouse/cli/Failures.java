@@ -5,6 +5,7 @@ import java.nio.file.AccessDeniedException;
 import java.nio.file.FileSystemException;
 import picocli.CommandLine;
 import weighhouse.report.text.Visible;
+import weighhouse.rules.RuleFaultsException;
 import weighhouse.workbook.UnreadableWorkbookException;
 
 /** One sentence for whatever went wrong; a stack trace only where it was asked for. */
@@ -25,6 +26,9 @@ final class Failures {
   static int failed(Exception e, Console console, boolean trace) {
     if (e instanceof UnusableException || e instanceof UnreadableWorkbookException) {
       console.complain(e.getMessage());
+    } else if (e instanceof RuleFaultsException) {
+      console.complain(e.getMessage());
+      console.complain("Mend these rule files, then run: weighhouse rules --check DIR");
     } else if (e instanceof IOException io) {
       console.complain(sentence(io));
     } else {

@@ -1,6 +1,8 @@
 package weighhouse.cli;
 
 import java.nio.file.Path;
+import java.time.LocalDate;
+import java.time.ZoneId;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -13,6 +15,7 @@ import weighhouse.audit.AuditResult;
 import weighhouse.audit.Brief;
 import weighhouse.audit.Finding;
 import weighhouse.audit.Gate;
+import weighhouse.audit.Lapsed;
 import weighhouse.audit.Severity;
 import weighhouse.report.text.Visible;
 import weighhouse.workbook.UnreadableWorkbookException;
@@ -61,9 +64,12 @@ final class GateCommand implements Callable<Integer> {
     Map<String, Path> files = Workbooks.find(workbooks);
     Setting.Audits audits = setting.audits().apply(inputs.options(brief, 0, 1));
     int status = Status.PASS;
+    List<String> found = new ArrayList<>();
     for (Path file : files.values()) {
-      status = Status.worst(status, gate(audits, file, demands(brief)));
+      status = Status.worst(status, gate(audits, file, demands(brief), found));
     }
+    Lapsed.of(brief, found, LocalDate.now(ZoneId.systemDefault()))
+        .forEach(sentence -> console.complain(Visible.text(sentence)));
     return status;
   }
 
@@ -74,11 +80,12 @@ final class GateCommand implements Callable<Integer> {
         : new Brief.Demands(holdAt, demands.leastCoverage(), demands.leastReproduction());
   }
 
-  private int gate(Setting.Audits audits, Path file, Brief.Demands demands)
+  private int gate(Setting.Audits audits, Path file, Brief.Demands demands, List<String> found)
       throws java.io.IOException {
     try {
       AuditResult result = audits.audit(file);
       Gate gate = Gate.of(result, demands);
+      result.findings().forEach(finding -> found.add(finding.id()));
       if (!quiet) {
         say(result, gate);
       }

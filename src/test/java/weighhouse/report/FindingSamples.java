@@ -142,6 +142,30 @@ final class FindingSamples {
         new Finding.Acceptance(text, text, text));
   }
 
+  static Finding at(CellRange cells, String suggested) {
+    return new Finding(
+        "0123456789",
+        rule("hazard-ratio-times-probability", "scale", "A hazard ratio multiplies a probability"),
+        Severity.MAJOR,
+        Certainty.PROVEN,
+        List.of(cells),
+        cells.first(),
+        "=A2*$A$1",
+        null,
+        suggested,
+        List.of(),
+        List.of(),
+        false,
+        false,
+        "A hazard ratio multiplies a probability.",
+        "It acts on the hazard.",
+        "",
+        List.of(),
+        List.of(),
+        List.of(),
+        null);
+  }
+
   static Finding copy(Finding f, String id) {
     return new Finding(
         id,

@@ -88,6 +88,24 @@ public final class Samples {
         workbook(HOSTILE + ".xlsx"), List.of(FindingSamples.hostile(HOSTILE)), Verdict.HOLD);
   }
 
+  /** An audit of that workbook with one finding at the cells. */
+  public static AuditResult with(Workbook workbook, CellRange cells, String suggested) {
+    return new AuditResult(
+        workbook,
+        1,
+        Verdict.HOLD,
+        List.of(FindingSamples.at(cells, suggested)),
+        List.of(),
+        List.of(),
+        false,
+        Double.NaN,
+        null,
+        new Coverage(
+            300, 300, 299, 299, List.of(), Map.of(), List.of(), List.of(), List.of(), List.of()),
+        List.of(),
+        List.of());
+  }
+
   private static AuditResult with(Workbook workbook, List<Finding> findings, Verdict verdict) {
     boolean fault = !findings.isEmpty();
     return new AuditResult(
