@@ -28,7 +28,7 @@ final class CoverageSection {
   }
 
   private static void counts(Coverage coverage, Element section) {
-    Element body = Tags.table(section, "Formula cells", List.of("", "Cells", "Share"));
+    Element body = Tags.table(section, "Formula cells", List.of("What", "Cells", "Share"));
     int all = coverage.formulaCells();
     Tags.row(body, "Formula cells", numbers(all, all));
     Tags.row(body, "Formula read", numbers(coverage.read(), all));

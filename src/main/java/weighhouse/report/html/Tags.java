@@ -32,7 +32,7 @@ final class Tags {
     Element frame =
         add(parent, "div", "scroll")
             .attr("tabindex", "0")
-            .attr("role", "region")
+            .attr("role", "group")
             .attr("aria-label", Visible.text(caption));
     Element table = frame.appendElement("table");
     text(table, "caption", "", caption);
