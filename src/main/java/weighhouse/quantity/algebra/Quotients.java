@@ -17,7 +17,7 @@ final class Quotients {
       return a.literal()
           ? Term.number(a.value() / b.value())
           : Products.multiply(a, Term.number(1 / b.value()));
-    } else if (a.is(Form.NEGATIVE)) {
+    } else if (a.is(Form.NEGATIVE) || (a.literal() && a.value() < 0)) {
       return divide(a.negated(), b, part).negated();
     } else if (a.literal()) {
       return reciprocal(a, b);

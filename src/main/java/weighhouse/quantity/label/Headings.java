@@ -24,11 +24,12 @@ public final class Headings {
   public List<Label> near(CellAddress cell) {
     List<Label> found = new ArrayList<>();
     SheetTexts texts = sheets.get(cell.sheet());
+    new RowLabels(texts, cell.row(), cell.column())
+        .find((place, column) -> add(texts, place, cell.row(), column, cell.sheet(), found));
+    // after the row's own label, which is written with more care than a name
     for (String name : names.of(cell)) {
       found.add(new Label(name, Place.NAME, null, vocabulary.read(name)));
     }
-    new RowLabels(texts, cell.row(), cell.column())
-        .find((place, column) -> add(texts, place, cell.row(), column, cell.sheet(), found));
     new ColumnHeadings(texts, cell.column())
         .find(cell.row(), row -> add(texts, Place.ABOVE, row, cell.column(), cell.sheet(), found));
     remote(texts, cell, found);
