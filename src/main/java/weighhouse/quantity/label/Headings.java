@@ -29,18 +29,24 @@ public final class Headings {
     }
     new RowLabels(texts, cell.row(), cell.column())
         .find((place, column) -> add(texts, place, cell.row(), column, cell.sheet(), found));
+    int[] title = texts.titles().above(cell.row(), cell.column());
+    int section = title == null ? -1 : title[0];
     new ColumnHeadings(texts, cell.column())
-        .find(cell.row(), row -> add(texts, Place.ABOVE, row, cell.column(), cell.sheet(), found));
-    remote(texts, cell, found);
+        .find(
+            cell.row(),
+            row -> {
+              Place place = row < section ? Place.FAR_HEADING : Place.ABOVE;
+              add(texts, place, row, cell.column(), cell.sheet(), found);
+            });
+    remote(texts, cell, title, found);
     return found;
   }
 
-  private void remote(SheetTexts texts, CellAddress cell, List<Label> found) {
+  private void remote(SheetTexts texts, CellAddress cell, int[] title, List<Label> found) {
     String comment = workbook.sheet(cell.sheet()).comments().get(cell);
     if (comment != null) {
       found.add(new Label(comment, Place.COMMENT, cell, vocabulary.read(comment)));
     }
-    int[] title = texts.titles().above(cell.row(), cell.column());
     if (title != null) {
       add(texts, Place.SECTION, title[0], title[1], cell.sheet(), found);
     }
