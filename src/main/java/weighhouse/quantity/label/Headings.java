@@ -80,6 +80,14 @@ public final class Headings {
     return tells[0];
   }
 
+  /** Whether any text stands beside a number, so that the number is one of its own. */
+  public boolean hasText(CellAddress cell) {
+    boolean[] any = {names.isNamed(cell)};
+    new RowLabels(sheets.get(cell.sheet()), cell.row(), cell.column())
+        .find((place, column) -> any[0] = true);
+    return any[0];
+  }
+
   /** Whether a heading or name that tells something stands over that very column. */
   public boolean isHeaded(CellAddress cell) {
     if (names.isNamed(cell)) {

@@ -16,8 +16,7 @@ final class SenseWords {
           Kind.HAZARD_REDUCTION,
           Kind.RISK_REDUCTION);
 
-  private static final Set<Kind> SPECIFIC =
-      EnumSet.range(Kind.HAZARD_RATIO, Kind.TIME_RATIO);
+  private static final Set<Kind> SPECIFIC = EnumSet.range(Kind.HAZARD_RATIO, Kind.TIME_RATIO);
 
   private final Phrases<Sense> kinds = new Phrases<>();
   private final Phrases<Sense> parts = new Phrases<>();
