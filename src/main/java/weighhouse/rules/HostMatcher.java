@@ -1,10 +1,13 @@
 package weighhouse.rules;
 
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 import java.util.function.ToDoubleFunction;
 import weighhouse.formula.Expr;
 import weighhouse.formula.Trees;
+import weighhouse.quantity.Kind;
 import weighhouse.recalculate.Values;
 import weighhouse.rules.pattern.FormulaView;
 import weighhouse.rules.pattern.Found;
@@ -15,6 +18,19 @@ import weighhouse.workbook.CellAddress;
 
 /** All that the rules' patterns find in the formula of one cell. */
 final class HostMatcher {
+  private static final Set<Kind> NEVER_NEGATIVE =
+      EnumSet.of(
+          Kind.PROBABILITY,
+          Kind.RATE,
+          Kind.CUMULATIVE_HAZARD,
+          Kind.SURVIVAL,
+          Kind.ODDS,
+          Kind.HAZARD_RATIO,
+          Kind.RATE_RATIO,
+          Kind.RISK_RATIO,
+          Kind.ODDS_RATIO,
+          Kind.MORTALITY_RATIO);
+
   private final List<LoadedRule> rules;
   private final Subject subject;
   private final ModelScope scope;
@@ -50,8 +66,17 @@ final class HostMatcher {
         hits.add(new Hit(rule, found));
       }
     }
+    hits.removeIf(hit -> hasNegativeRisk(hit, host, values));
+    hits.removeIf(hit -> ComparedArms.reversed(hit.found(), host, subject.quantities(), scope));
     hits.removeIf(hit -> hits.stream().anyMatch(other -> yields(hit, other)));
     return hits;
+  }
+
+  /** Minus a hazard is typed like the hazard that it was made of; no risk is below 0. */
+  private boolean hasNegativeRisk(Hit hit, CellAddress host, ToDoubleFunction<Expr> values) {
+    return hit.found().operands().values().stream()
+        .filter(operand -> NEVER_NEGATIVE.contains(subject.quantities().of(operand, host).kind()))
+        .anyMatch(operand -> values.applyAsDouble(operand) < 0);
   }
 
   /** A rule's patterns are several ways to say one thing: the first that fits a place speaks. */

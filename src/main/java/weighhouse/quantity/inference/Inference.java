@@ -72,6 +72,7 @@ public final class Inference {
     Links links = new Links(units, operands);
     if (model) {
       units.all().forEach(unit -> unit.guess = guess(unit));
+      new Limits(units).assign();
       new Traces(units, numbers).mark();
       new Matrices(workbook, units, numbers).mark();
     }

@@ -35,7 +35,7 @@ final class Judge {
   static Verdict of(Unit unit) {
     if (unit.declared != null) {
       return new Verdict(unit.declared, Source.DECLARATION);
-    } else if (unit.guess.parameter()) {
+    } else if (unit.guess.parameter() && unit.structural == Kind.UNKNOWN) {
       return Verdict.NOTHING;
     }
     Source source = source(unit);

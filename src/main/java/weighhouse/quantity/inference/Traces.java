@@ -21,6 +21,9 @@ final class Traces {
   private static final int MOST_STATES = 16;
   private static final double ROUNDING = 1e-6;
 
+  /** A state of a faulty model may hold more than the whole cohort, but not much more. */
+  private static final double MOST_LEAKING = 1.5;
+
   private final Units units;
   private final ToDoubleFunction<CellAddress> numbers;
 
@@ -137,7 +140,7 @@ final class Traces {
   }
 
   private static boolean fraction(double number, double whole) {
-    return number >= -ROUNDING && number <= whole * 1.5;
+    return Double.isNaN(number) || (number >= -ROUNDING && number <= whole * MOST_LEAKING);
   }
 
   private double sum(List<Unit> window, Lines lines, int cycle) {

@@ -59,7 +59,10 @@ final class UnitFinder {
 
   private void down(CellRange range, int column, Expr tree) {
     Predicate<Integer> apart =
-        row -> isApart(new CellAddress(range.sheet(), row, column), headings::isLabelled);
+        row ->
+            isApart(
+                new CellAddress(range.sheet(), row, column),
+                tree == null ? headings::hasText : headings::isLabelled);
     lines(
         range.firstRow(),
         range.lastRow(),

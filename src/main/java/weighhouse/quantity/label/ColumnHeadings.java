@@ -37,8 +37,19 @@ final class ColumnHeadings {
     }
   }
 
-  /** Whether numbers, and no table's end, follow under the text. */
+  /** Whether the text heads its column, by the numbers under it or as one of a row of headings. */
   private boolean heads(int text) {
+    boolean left = isText(text, column - 1);
+    boolean inRow = left && (isText(text, column + 1) || isText(text, column - 2));
+    return inRow || isOverNumber(text);
+  }
+
+  private boolean isText(int row, int at) {
+    return at >= 0 && texts.at(row, at) != null;
+  }
+
+  /** Whether numbers, and no other text, follow under the text. */
+  private boolean isOverNumber(int text) {
     for (int row = text + 1; row <= text + 1 + MOST_BLANKS; row++) {
       if (texts.isNumber(row, column)) {
         return true;

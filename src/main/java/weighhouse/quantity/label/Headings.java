@@ -30,18 +30,24 @@ public final class Headings {
     for (String name : names.of(cell)) {
       found.add(new Label(name, Place.NAME, null, vocabulary.read(name)));
     }
+    int[] title = texts.titles().above(cell.row(), cell.column());
+    int section = title == null ? -1 : title[0];
     new ColumnHeadings(texts, cell.column())
-        .find(cell.row(), row -> add(texts, Place.ABOVE, row, cell.column(), cell.sheet(), found));
-    remote(texts, cell, found);
+        .find(
+            cell.row(),
+            row -> {
+              Place place = row < section ? Place.FAR_HEADING : Place.ABOVE;
+              add(texts, place, row, cell.column(), cell.sheet(), found);
+            });
+    remote(texts, cell, title, found);
     return found;
   }
 
-  private void remote(SheetTexts texts, CellAddress cell, List<Label> found) {
+  private void remote(SheetTexts texts, CellAddress cell, int[] title, List<Label> found) {
     String comment = workbook.sheet(cell.sheet()).comments().get(cell);
     if (comment != null) {
       found.add(new Label(comment, Place.COMMENT, cell, vocabulary.read(comment)));
     }
-    int[] title = texts.titles().above(cell.row(), cell.column());
     if (title != null) {
       add(texts, Place.SECTION, title[0], title[1], cell.sheet(), found);
     }
@@ -73,6 +79,14 @@ public final class Headings {
     new RowLabels(texts, cell.row(), cell.column())
         .find((place, column) -> tells[0] |= vocabulary.read(texts.at(cell.row(), column)).tells());
     return tells[0];
+  }
+
+  /** Whether any text stands beside a number, so that the number is one of its own. */
+  public boolean hasText(CellAddress cell) {
+    boolean[] any = {names.isNamed(cell)};
+    new RowLabels(sheets.get(cell.sheet()), cell.row(), cell.column())
+        .find((place, column) -> any[0] = true);
+    return any[0];
   }
 
   /** Whether a heading or name that tells something stands over that very column. */

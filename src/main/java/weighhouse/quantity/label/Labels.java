@@ -61,9 +61,6 @@ public final class Labels {
     boolean thing = isThing(labels);
     for (Label label : labels) {
       parameter |= isParameter(label, labels);
-      if (isOfAnotherSection(label, labels)) {
-        continue;
-      }
       int bonus = thing && label.place() == Place.ABOVE ? 0 : MEASURE;
       for (Sense sense : label.reading().senses()) {
         Candidate candidate = candidate(label, sense, number, bonus);
@@ -86,18 +83,6 @@ public final class Labels {
         .filter(label -> label.place() == Place.LEFT || label.place() == Place.RIGHT)
         .flatMap(label -> label.reading().senses().stream())
         .anyMatch(sense -> THINGS.contains(sense.kind()));
-  }
-
-  /**
-   * Whether the title of a section of other things stands between the column's heading and the
-   * number.
-   */
-  private static boolean isOfAnotherSection(Label label, List<Label> labels) {
-    return label.place() == Place.ABOVE
-        && labels.stream()
-            .filter(l -> l.place() == Place.SECTION && l.where() != null)
-            .filter(l -> !l.reading().senses().isEmpty())
-            .anyMatch(section -> section.where().row() > label.where().row());
   }
 
   private static Candidate candidate(Label label, Sense sense, double number, int measureBonus) {
@@ -127,14 +112,16 @@ public final class Labels {
     Figure figure = label.reading().figure();
     return figure != null
         && figure.isParameter()
-        && label.place() == Place.ABOVE
+        && (label.place() == Place.ABOVE || label.place() == Place.FAR_HEADING)
         && labels.stream().anyMatch(l -> l.place() == Place.LEFT || l.place() == Place.NAME);
   }
 
   private static Role role(List<Label> labels) {
     for (Label label : labels) {
       Figure figure = label.reading().figure();
-      boolean near = label.place().remoteness() <= Place.ABOVE.remoteness();
+      boolean near =
+          label.place().remoteness() <= Place.ABOVE.remoteness()
+              || label.place() == Place.FAR_HEADING;
       if (near && figure != null && !figure.isParameter() && figure.role() != Role.ESTIMATE) {
         return figure.role();
       }
@@ -149,7 +136,7 @@ public final class Labels {
     }
     return labels.stream()
         .filter(label -> label.reading().span() != null)
-        .filter(label -> label.place() != Place.SHEET)
+        .filter(l -> l.place() != Place.SHEET && l.place() != Place.FAR_HEADING)
         .map(label -> label.reading().span())
         .findFirst()
         .orElse(null);

@@ -11,6 +11,8 @@ public enum Place {
   COMMENT("comment", 3, 0),
   /** A short text behind the number that tells its unit. */
   UNIT("unit", 4, 1),
+  /** A heading with the title of another section between: its figures count, its kinds hardly. */
+  FAR_HEADING("heading", 7, 2),
   SECTION("section title", 6, 1),
   SHEET("sheet name", 8, 2);
 

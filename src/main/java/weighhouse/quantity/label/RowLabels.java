@@ -32,7 +32,13 @@ final class RowLabels {
         found.accept(Place.LEFT, left - 1);
       }
     }
-    right(left >= 0, found);
+    boolean described = left >= 0 && !isName(left);
+    right(described, found);
+  }
+
+  /** A short name without spaces calls for a description further right. */
+  private boolean isName(int at) {
+    return texts.at(row, at).strip().indexOf(' ') < 0;
   }
 
   /** Column of the text on the left that belongs to the same table, or -1. */
@@ -101,7 +107,8 @@ final class RowLabels {
   private void right(boolean labelled, BiConsumer<Place, Integer> found) {
     int blanks = 0;
     boolean first = true;
-    for (int at = column + 1; at <= column + REACH_RIGHT && blanks <= 2; at++) {
+    int most = labelled ? 2 : REACH_RIGHT;
+    for (int at = column + 1; at <= column + REACH_RIGHT && blanks <= most; at++) {
       if (texts.at(row, at) == null) {
         blanks = texts.isBlank(row, at) ? blanks + 1 : 0;
         continue;

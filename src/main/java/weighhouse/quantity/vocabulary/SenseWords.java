@@ -2,11 +2,22 @@ package weighhouse.quantity.vocabulary;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 import weighhouse.quantity.Kind;
 
 /** Reads the kinds that a text speaks for. */
 final class SenseWords {
+  private static final Set<Kind> GENERAL =
+      EnumSet.of(
+          Kind.RELATIVE_EFFECT,
+          Kind.RELATIVE_REDUCTION,
+          Kind.HAZARD_REDUCTION,
+          Kind.RISK_REDUCTION);
+
+  private static final Set<Kind> SPECIFIC = EnumSet.range(Kind.HAZARD_RATIO, Kind.TIME_RATIO);
+
   private final Phrases<Sense> kinds = new Phrases<>();
   private final Phrases<Sense> parts = new Phrases<>();
   private final Phrases<String> complements = new Phrases<>();
@@ -25,6 +36,31 @@ final class SenseWords {
 
   /** The senses, the most telling first; among equals the first of the text. */
   List<Sense> read(List<Token> words, boolean name, SpanWords.Timing timing) {
+    List<Sense> senses = inOrder(words, name, timing);
+    if (senses.isEmpty() && timing != null && timing.personTime()) {
+      senses.add(new Sense(Kind.RATE, Strength.FAIR, 1));
+    }
+    senses.sort(Comparator.comparing(Sense::strength).reversed());
+    specificFirst(senses);
+    return senses;
+  }
+
+  /** "Relative effect (HR)", "reduction in rate, as hazard ratio": the ratio says what is meant. */
+  private static void specificFirst(List<Sense> senses) {
+    if (senses.size() > 1 && GENERAL.contains(senses.get(0).kind())) {
+      senses.stream()
+          .filter(sense -> SPECIFIC.contains(sense.kind()))
+          .filter(sense -> sense.strength().atLeast(Strength.FAIR))
+          .findFirst()
+          .ifPresent(
+              ratio -> {
+                senses.remove(ratio);
+                senses.add(0, ratio.as(senses.get(0).strength()));
+              });
+    }
+  }
+
+  private List<Sense> inOrder(List<Token> words, boolean name, SpanWords.Timing timing) {
     List<Sense> senses = new ArrayList<>();
     boolean complement = false;
     for (int i = 0; i < words.size(); ) {
@@ -40,10 +76,6 @@ final class SenseWords {
         }
       }
     }
-    if (senses.isEmpty() && timing != null && timing.personTime()) {
-      senses.add(new Sense(Kind.RATE, Strength.FAIR, 1));
-    }
-    senses.sort(Comparator.comparing(Sense::strength).reversed());
     return senses;
   }
 

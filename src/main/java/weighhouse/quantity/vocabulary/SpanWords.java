@@ -40,6 +40,17 @@ final class SpanWords {
     }
   }
 
+  /** The unit that the words name without saying more: "cycle length (months)"; null if none. */
+  Span bareUnit(List<Token> words) {
+    for (int i = 0; i < words.size(); i++) {
+      Phrases.Found<TimeUnit> found = units.longest(words, i, true);
+      if (found != null && found.meaning() != TimeUnit.CYCLE) {
+        return Span.of(1, found.meaning());
+      }
+    }
+    return null;
+  }
+
   boolean names(TimeUnit unit, List<Token> words) {
     for (int i = 0; i < words.size(); i++) {
       Phrases.Found<TimeUnit> found = units.longest(words, i, true);

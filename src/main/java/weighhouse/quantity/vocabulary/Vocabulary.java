@@ -1,8 +1,12 @@
 package weighhouse.quantity.vocabulary;
 
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import weighhouse.quantity.Kind;
+import weighhouse.quantity.Span;
 import weighhouse.quantity.TimeUnit;
 
 /**
@@ -12,6 +16,10 @@ import weighhouse.quantity.TimeUnit;
 public final class Vocabulary {
   /** Texts kept; more than the distinct labels of any but the largest workbooks. */
   private static final int MEMORY = 50_000;
+
+  /** Kinds of which a unit of time in the label is the unit. */
+  private static final Set<Kind> LENGTHS =
+      EnumSet.of(Kind.CYCLE_LENGTH, Kind.TIME, Kind.SURVIVAL_TIME);
 
   final SenseWords senses = new SenseWords();
   final FigureWords figures = new FigureWords();
@@ -41,11 +49,11 @@ public final class Vocabulary {
       return Reading.NOTHING;
     }
     SpanWords.Timing timing = spans.read(words);
-    Reading reading =
-        new Reading(
-            List.copyOf(senses.read(words, name, timing)),
-            timing == null ? null : timing.span(),
-            figures.read(words, name));
+    List<Sense> kinds = List.copyOf(senses.read(words, name, timing));
+    boolean measuresTime = !kinds.isEmpty() && LENGTHS.contains(kinds.get(0).kind());
+    Span bare = measuresTime && timing == null ? spans.bareUnit(words) : null;
+    Span span = timing == null ? bare : timing.span();
+    Reading reading = new Reading(kinds, span, figures.read(words, name));
     return reading.tells() ? reading : Reading.NOTHING;
   }
 

@@ -19,6 +19,10 @@ final class Words {
       Pattern.compile("\\d+(?:[.,]\\d+)?|\\p{L}+|[%/()\\[\\]=<>:,;+\\u2192]");
   private static final Pattern JOINTS =
       Pattern.compile("(?<=[a-z])(?=[A-Z])|(?<=[A-Z])(?=[A-Z][a-z]{2})");
+
+  /** Abbreviations are shorter. */
+  private static final Pattern LONG_WORD = Pattern.compile("\\p{L}{6}");
+
   private static final Pattern INITIALS = Pattern.compile("\\b(\\p{L})\\.(\\p{L})\\.(?!\\p{L})");
 
   private Words() {}
@@ -59,7 +63,7 @@ final class Words {
 
   /** In a heading all in capitals, capitals tell nothing. */
   private static boolean isShouted(String text) {
-    return text.equals(text.toUpperCase(Locale.ROOT)) && text.strip().split("\\s+").length > 2;
+    return text.equals(text.toUpperCase(Locale.ROOT)) && LONG_WORD.matcher(text).find();
   }
 
   private static boolean isCapitals(String word) {
