@@ -12,8 +12,8 @@ import weighhouse.rules.pattern.ModelScope;
 import weighhouse.workbook.CellAddress;
 
 /**
- * Which arms a ratio's label compares: "HR usual care versus drug" used for the drug is rightly turned
- * round.
+ * Which arms a ratio's label compares: "HR usual care versus drug" used for the drug is rightly
+ * turned round.
  */
 final class ComparedArms {
   private static final Pattern VERSUS =
@@ -21,15 +21,18 @@ final class ComparedArms {
           "(.+?)\\b(?:versus|vs\\.?|compared (?:with|to)|gegen|contra|frente a)\\s+(.+)",
           Pattern.CASE_INSENSITIVE);
 
+  /** The one rule to which the direction of a comparison matters. */
+  private static final String RECIPROCALS = "ratio-inverted";
+
   private ComparedArms() {}
 
   /**
-   * Whether the formula takes a reciprocal and a ratio in it speaks of the other arm against the one
-   * that the host's label names.
+   * Whether the formula takes a reciprocal and a ratio in it speaks of the other arm against the
+   * one that the host's label names.
    */
   static boolean reversed(
-      Found found, CellAddress host, Quantities quantities, ModelScope scope) {
-    if (!found.pattern().rule().equals("ratio-inverted")) {
+      Rule rule, Found found, CellAddress host, Quantities quantities, ModelScope scope) {
+    if (!rule.id().equals(RECIPROCALS)) {
       return false;
     }
     ReferenceResolver references = new ReferenceResolver(scope.workbook());

@@ -67,7 +67,10 @@ final class HostMatcher {
       }
     }
     hits.removeIf(hit -> hasNegativeRisk(hit, host, values));
-    hits.removeIf(hit -> ComparedArms.reversed(hit.found(), host, subject.quantities(), scope));
+    hits.removeIf(
+        hit ->
+            ComparedArms.reversed(
+                hit.rule().rule(), hit.found(), host, subject.quantities(), scope));
     hits.removeIf(hit -> hits.stream().anyMatch(other -> yields(hit, other)));
     return hits;
   }

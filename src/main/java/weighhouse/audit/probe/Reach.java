@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.function.Predicate;
 import weighhouse.formula.Region;
+import weighhouse.formula.Shape;
 import weighhouse.quantity.Kind;
 import weighhouse.rules.Subject;
 import weighhouse.workbook.CellAddress;
@@ -28,11 +29,19 @@ final class Reach {
     List<Region> reached = new ArrayList<>();
     for (Region region : subject.shapes().regions()) {
       if (kinds.test(subject.quantities().at(region.range().first()).kind())
+          && !givesRatio(region)
           && dependsOnMeasure(region.range())) {
         reached.add(region);
       }
     }
     return reached;
+  }
+
+  /** Whether its formula only passes a ratio on, whatever its label makes of it. */
+  private boolean givesRatio(Region region) {
+    Shape shape = subject.shapes().all().get(region.shape());
+    Kind kind = subject.quantities().of(shape.tree(), region.range().first()).kind();
+    return RatioLaw.of(kind).isPresent();
   }
 
   private boolean dependsOnMeasure(CellRange range) {

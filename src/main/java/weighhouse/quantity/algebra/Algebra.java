@@ -88,8 +88,7 @@ public final class Algebra {
         && binary.right() instanceof Expr.CellRef r) {
       boolean sameMoment = l.row().equals(r.row()) != l.column().equals(r.column());
       // time runs down or across; two curves at one moment share the host's own row or column
-      boolean besideHost =
-          l.row().equals(r.row()) ? l.row().value() == 0 : l.column().value() == 0;
+      boolean besideHost = l.row().equals(r.row()) ? l.row().value() == 0 : l.column().value() == 0;
       boolean acrossCurves = sameMoment && besideHost;
       return Term.of(acrossCurves ? Kind.OCCUPANCY : Kind.PROBABILITY);
     }
