@@ -102,10 +102,8 @@ final class ArrayFunctions {
 
   private static boolean equal(List<Value> a, List<Value> b) {
     for (int i = 0; i < a.size(); i++) {
-      boolean same =
-          a.get(i) instanceof Value.Fault || b.get(i) instanceof Value.Fault
-              ? a.get(i).equals(b.get(i))
-              : Order.equal(a.get(i), b.get(i));
+      boolean fault = a.get(i) instanceof Value.Fault || b.get(i) instanceof Value.Fault;
+      boolean same = fault ? a.get(i).equals(b.get(i)) : Order.equal(a.get(i), b.get(i));
       if (!same) {
         return false;
       }

@@ -41,14 +41,10 @@ final class ConditionalSums {
       blanks &= criteria[i].test(new Value.Blank());
     }
     return matching(
-        grids,
-        criteria,
-        blanks ? shape.rows() : rows,
-        blanks ? shape.columns() : columns);
+        grids, criteria, blanks ? shape.rows() : rows, blanks ? shape.columns() : columns);
   }
 
-  private static List<Place> matching(
-      Grid[] grids, Criterion[] criteria, int rows, int columns) {
+  private static List<Place> matching(Grid[] grids, Criterion[] criteria, int rows, int columns) {
     List<Place> places = new ArrayList<>();
     for (int r = 0; r < rows; r++) {
       for (int c = 0; c < columns; c++) {

@@ -19,14 +19,17 @@ final class DateFunctions {
     entries.general("MONTH", "V", a -> Coerce.of(parts(a, 0).month()));
     entries.general("DAY", "V", a -> Coerce.of(parts(a, 0).day()));
     entries.general("EDATE", "VV", a -> number(a, day(a, 0).plusMonths(a.integer(1))));
-    entries.general("EOMONTH", "VV", a -> number(a, endOfMonth(day(a, 0).plusMonths(a.integer(1)))));
-    entries.general("DAYS", "VV", a -> Coerce.of(Math.floor(a.number(0)) - Math.floor(a.number(1))));
+    entries.general(
+        "EOMONTH", "VV", a -> number(a, endOfMonth(day(a, 0).plusMonths(a.integer(1)))));
+    entries.general(
+        "DAYS", "VV", a -> Coerce.of(Math.floor(a.number(0)) - Math.floor(a.number(1))));
     entries.general("DAYS360", "VVv", DateFunctions::days360);
     entries.general("DATEDIF", "VVV", DateFunctions::difference);
-    entries.general("YEARFRAC", "VVv", a -> Coerce.of(YearFraction.of(
-        day(a, 0), day(a, 1), a.integer(2, 0))));
+    entries.general(
+        "YEARFRAC", "VVv", a -> Coerce.of(YearFraction.of(day(a, 0), day(a, 1), a.integer(2, 0))));
     entries.general("WEEKDAY", "Vv", DateFunctions::weekday);
-    entries.general("ISOWEEKNUM", "V", a -> Coerce.of(day(a, 0).get(IsoFields.WEEK_OF_WEEK_BASED_YEAR)));
+    entries.general(
+        "ISOWEEKNUM", "V", a -> Coerce.of(day(a, 0).get(IsoFields.WEEK_OF_WEEK_BASED_YEAR)));
     entries.general("DATEVALUE", "V", DateFunctions::dateValue);
     entries.general("TIME", "VVV", a -> Coerce.of(time(a)));
     entries.general("HOUR", "V", a -> Coerce.of((double) (seconds(a) / 3600 % 24)));
@@ -70,8 +73,7 @@ final class DateFunctions {
   }
 
   private static Value days360(Arguments a) {
-    return Coerce.of(
-        (double) YearFraction.days360(day(a, 0), day(a, 1), a.logical(2, false)));
+    return Coerce.of((double) YearFraction.days360(day(a, 0), day(a, 1), a.logical(2, false)));
   }
 
   private static Value difference(Arguments a) {

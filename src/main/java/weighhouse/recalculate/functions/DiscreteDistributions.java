@@ -28,9 +28,7 @@ final class DiscreteDistributions {
 
   private static Value of(IntegerDistribution distribution, int count, boolean cumulative) {
     return Coerce.of(
-        cumulative
-            ? distribution.cumulativeProbability(count)
-            : distribution.probability(count));
+        cumulative ? distribution.cumulativeProbability(count) : distribution.probability(count));
   }
 
   private static int count(Arguments a, int index) {
@@ -68,8 +66,7 @@ final class DiscreteDistributions {
     if (count(a, 0) > trials) {
       throw Fault.NUM.exception();
     }
-    return of(
-        new BinomialDistribution(null, trials, probability(a, 2)), count(a, 0), a.logical(3));
+    return of(new BinomialDistribution(null, trials, probability(a, 2)), count(a, 0), a.logical(3));
   }
 
   private static Value binomialQuantile(Arguments a) {

@@ -20,6 +20,8 @@ final class Distributions {
   /** Absolute accuracy of quantiles: small event probabilities have beta quantiles near 0. */
   private static final double ACCURACY = 1e-15;
 
+  private static final int POLISHING = 3;
+
   private Distributions() {}
 
   static void enter(Entries entries) {
@@ -54,17 +56,31 @@ final class Distributions {
         });
   }
 
-
   private static Value above(Arguments a, Family family) {
     return guarded(() -> 1 - family.of(a, 1).cumulativeProbability(a.number(0)));
   }
 
   private static Value quantile(Arguments a, Family family) {
-    return guarded(() -> family.of(a, 1).inverseCumulativeProbability(checked(a.number(0))));
+    return guarded(() -> inverse(family.of(a, 1), checked(a.number(0))));
   }
 
   private static Value upperQuantile(Arguments a, Family family) {
-    return guarded(() -> family.of(a, 1).inverseCumulativeProbability(1 - checked(a.number(0))));
+    return guarded(() -> inverse(family.of(a, 1), 1 - checked(a.number(0))));
+  }
+
+  /** The library's quantile, whose accuracy is absolute, made relative by steps of Newton. */
+  private static double inverse(RealDistribution distribution, double p) {
+    double x = distribution.inverseCumulativeProbability(p);
+    for (int i = 0; i < POLISHING && p > 0 && p < 1; i++) {
+      double density = distribution.density(x);
+      double step = (distribution.cumulativeProbability(x) - p) / density;
+      boolean sound = density > 0 && Math.abs(step) < Math.abs(x) / 2;
+      if (!sound) {
+        return x;
+      }
+      x -= step;
+    }
+    return x;
   }
 
   private static Value guarded(java.util.function.DoubleSupplier calculation) {
@@ -105,8 +121,7 @@ final class Distributions {
     if (!(p > 0 && p <= 1) || high <= low) {
       throw Fault.NUM.exception();
     }
-    return guarded(
-        () -> low + (high - low) * family.of(a, 1).inverseCumulativeProbability(p));
+    return guarded(() -> low + (high - low) * inverse(family.of(a, 1), p));
   }
 
   private static void gamma(Entries entries) {
@@ -193,6 +208,6 @@ final class Distributions {
     if (!(p > 0 && p <= 1)) {
       throw Fault.NUM.exception();
     }
-    return guarded(() -> -family.of(a, 1).inverseCumulativeProbability(p / 2));
+    return guarded(() -> -inverse(family.of(a, 1), p / 2));
   }
 }

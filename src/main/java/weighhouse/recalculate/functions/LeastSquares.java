@@ -76,7 +76,9 @@ final class LeastSquares {
     return rows;
   }
 
-  /** Coefficients from the last variable to the first and the constant; with statistics if asked. */
+  /**
+   * Coefficients from the last variable to the first and the constant; with statistics if asked.
+   */
   static Value table(Arguments a, boolean logarithmic) {
     LeastSquares fit = of(a, logarithmic, 2);
     int variables = fit.coefficients.length - (fit.intercept ? 1 : 0);

@@ -13,9 +13,7 @@ final class Matrices {
     entries.general("MMULT", "AA", a -> product(of(a.grid(0)), of(a.grid(1))));
     entries.general("MINVERSE", "A", a -> inverse(square(a.grid(0))));
     entries.general(
-        "MDETERM",
-        "A",
-        a -> Coerce.of(new LUDecomposition(square(a.grid(0)), 0).getDeterminant()));
+        "MDETERM", "A", a -> Coerce.of(new LUDecomposition(square(a.grid(0)), 0).getDeterminant()));
     entries.general("TRANSPOSE", "A", a -> transposed(a.grid(0)));
     entries.general("MUNIT", "V", a -> unit(a.integer(0)));
   }

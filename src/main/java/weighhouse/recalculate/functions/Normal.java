@@ -72,9 +72,7 @@ final class Normal {
   private static Value normal(Arguments a, double x, boolean cumulative, double divisor) {
     double z = (x - a.number(1)) / deviation(a);
     return Coerce.of(
-        cumulative
-            ? below(z)
-            : Math.exp(-z * z / 2) / (ROOT_TWO_PI * deviation(a) * divisor));
+        cumulative ? below(z) : Math.exp(-z * z / 2) / (ROOT_TWO_PI * deviation(a) * divisor));
   }
 
   private static Value standard(double z, boolean cumulative) {

@@ -69,8 +69,7 @@ final class Ranks {
     double number = a.number(0);
     double[] numbers = Numbers.in(a, 1);
     boolean ascending = a.number(2, 0) != 0;
-    long before =
-        Arrays.stream(numbers).filter(n -> ascending ? n < number : n > number).count();
+    long before = Arrays.stream(numbers).filter(n -> ascending ? n < number : n > number).count();
     long equal = Arrays.stream(numbers).filter(n -> n == number).count();
     if (equal == 0) {
       throw Fault.NA.exception();
@@ -91,7 +90,8 @@ final class Ranks {
     while (below > 0 && sorted[below - 1] == x) {
       below--;
     }
-    double part = sorted[below] == x ? 0 : (x - sorted[below]) / (sorted[below + 1] - sorted[below]);
+    double part =
+        sorted[below] == x ? 0 : (x - sorted[below]) / (sorted[below + 1] - sorted[below]);
     double unit = Math.pow(10, a.integer(2, 3));
     double rank = sorted.length == 1 ? 1 : (below + part) / (sorted.length - 1);
     return Coerce.of(Math.floor(rank * unit + 1e-9) / unit);

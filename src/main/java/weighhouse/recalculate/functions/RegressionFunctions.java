@@ -23,7 +23,8 @@ final class RegressionFunctions {
     entries.general("LOGEST", "Aavv", a -> LeastSquares.table(a, true));
     entries.general("TREND", "Aaav", a -> LeastSquares.predicted(a, false));
     entries.general("GROWTH", "Aaav", a -> LeastSquares.predicted(a, true));
-    entries.general("FISHER", "V", a -> Coerce.of(Math.log((1 + a.number(0)) / (1 - a.number(0))) / 2));
+    entries.general(
+        "FISHER", "V", a -> Coerce.of(Math.log((1 + a.number(0)) / (1 - a.number(0))) / 2));
     entries.number("FISHERINV", Math::tanh);
   }
 

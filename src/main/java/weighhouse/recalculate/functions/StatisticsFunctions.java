@@ -18,10 +18,16 @@ final class StatisticsFunctions {
     of(entries, "HARMEAN", 1, n -> onlyPositive(n, 1 / StatUtils.mean(reciprocals(n))));
     of(entries, "MODE.SNGL", 1, StatisticsFunctions::mode);
     entries.alias("MODE.SNGL", "MODE");
-    of(entries, "SKEW", 3, n -> new org.apache.commons.math3.stat.descriptive.moment.Skewness()
-        .evaluate(n));
-    of(entries, "KURT", 4, n -> new org.apache.commons.math3.stat.descriptive.moment.Kurtosis()
-        .evaluate(n));
+    of(
+        entries,
+        "SKEW",
+        3,
+        n -> new org.apache.commons.math3.stat.descriptive.moment.Skewness().evaluate(n));
+    of(
+        entries,
+        "KURT",
+        4,
+        n -> new org.apache.commons.math3.stat.descriptive.moment.Kurtosis().evaluate(n));
     entries.general("TRIMMEAN", "RV", a -> trimmed(Numbers.in(a, 0), a.number(1)));
     everyValue(entries);
     Ranks.enter(entries);
