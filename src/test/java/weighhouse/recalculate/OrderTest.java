@@ -82,6 +82,14 @@ class OrderTest {
   }
 
   @Test
+  void computedReferencesMayMove() {
+    Book book = new Book().set("A1", 1).set("B1", "=OFFSET(C1,A1,0)+1");
+    book.set("C2", "=A1*10").set("C3", "=D3+A1").set("D3", "=A1*100");
+    assertEquals(11, book.number("B1"));
+    assertEquals(203, book.number(book.whatIf("A1", 2), "B1"));
+  }
+
+  @Test
   void dependentsAndPrecedents() {
     Book book = new Book().set("A1", 2).set("A2", "=A1+1").set("A3", "=A2*10").set("B1", "=A9");
     Set<CellRange> expected =

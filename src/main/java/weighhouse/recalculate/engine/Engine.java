@@ -18,6 +18,7 @@ import weighhouse.recalculate.Values;
 import weighhouse.recalculate.cells.CellState;
 import weighhouse.recalculate.cells.Layout;
 import weighhouse.recalculate.functions.Fault;
+import weighhouse.recalculate.order.Plan;
 import weighhouse.recalculate.order.Unit;
 import weighhouse.recalculate.program.Compiler;
 import weighhouse.recalculate.program.Footprint;
@@ -30,6 +31,9 @@ import weighhouse.workbook.CellRange;
 
 /** Calculation of one compiled workbook. */
 final class Engine implements Recalculation {
+  /** Rounds after which computed references that still move are left as they are. */
+  private static final int MOST_ROUNDS = 5;
+
   private final Model model;
   private final CellState base;
   private final Plans plans;
@@ -74,7 +78,7 @@ final class Engine implements Recalculation {
         drawing.add(unit);
       }
     }
-    Plans.Planned drawn = new Plans.Planned(planned.plan(), kept, planned.replaced());
+    Plans.Planned drawn = planned.keeping(kept);
     return borrowing(
         scratch -> {
           scratch.runner().frame().seed = seed;
@@ -101,26 +105,39 @@ final class Engine implements Recalculation {
     return new Plans.Difference(change.formulas(), constants);
   }
 
+  /** Runs, and again in another order where a computed reference has moved. */
   private Values run(Change change, Plans.Planned planned, Set<Integer> drawing, Scratch scratch) {
+    Plans.Planned present = planned;
+    for (int round = 0; ; round++) {
+      Map<CellAddress, Value> beside = once(change, present, drawing, scratch);
+      Plan.Pointers now = scratch.runner().pointed().pointers(present.pointers());
+      if (now.equals(present.pointers()) || round == MOST_ROUNDS) {
+        return scratch.values(beside);
+      }
+      present = plans.repointed(present, now);
+      scratch.reset();
+    }
+  }
+
+  /** Runs what depends on the change; answers with the values of cells that have no slot. */
+  private Map<CellAddress, Value> once(
+      Change change, Plans.Planned planned, Set<Integer> drawing, Scratch scratch) {
     PartialRun run = new PartialRun(planned.plan(), planned.kept(), scratch);
     Map<CellAddress, Value> beside = new HashMap<>();
-    change
-        .values()
-        .forEach(
-            (cell, value) -> {
-              int slot = slot(cell);
-              if (slot == Layout.NOWHERE) {
-                beside.put(cell, value);
-              } else {
-                scratch.set(slot, value);
-              }
-              run.changed(CellRange.of(cell));
-            });
+    for (Map.Entry<CellAddress, Value> entry : change.values().entrySet()) {
+      int slot = slot(entry.getKey());
+      if (slot == Layout.NOWHERE) {
+        beside.put(entry.getKey(), entry.getValue());
+      } else {
+        scratch.set(slot, entry.getValue());
+      }
+      run.changed(CellRange.of(entry.getKey()));
+    }
     List<Unit> units = planned.plan().units();
     planned.replaced().forEach(unit -> run.mark(unit, units.get(unit).hosts()));
     drawing.forEach(unit -> run.mark(unit, units.get(unit).hosts()));
     run.run();
-    return scratch.values(beside);
+    return beside;
   }
 
   private int slot(CellAddress cell) {

@@ -36,8 +36,14 @@ final class Plans {
    * A plan with what it does not run.
    *
    * @param replaced positions of the units that were put in
+   * @param pointers what computed references were seen to read
    */
-  record Planned(Plan plan, Set<Unit> kept, List<Integer> replaced) {}
+  record Planned(Plan plan, Set<Unit> kept, List<Integer> replaced, Plan.Pointers pointers) {
+    /** The same with other units kept. */
+    Planned keeping(Set<Unit> others) {
+      return new Planned(plan, others, replaced, pointers);
+    }
+  }
 
   private final Model model;
   private final Planned base;
@@ -54,7 +60,7 @@ final class Plans {
 
   Plans(Model model, Plan plan, Set<Unit> kept, Plan.Pointers pointers) {
     this.model = model;
-    this.base = new Planned(plan, kept, List.of());
+    this.base = new Planned(plan, kept, List.of(), pointers);
     this.pointers = pointers;
   }
 
@@ -103,7 +109,13 @@ final class Plans {
       replaced.add(i);
     }
     Plan plan = new Plan(units, model.workbook().sheets().size(), pointers);
-    return new Planned(plan, kept, replaced);
+    return new Planned(plan, kept, replaced, pointers);
+  }
+
+  /** The same units in the order that computed references now ask for. */
+  Planned repointed(Planned planned, Plan.Pointers now) {
+    Plan plan = new Plan(planned.plan().units(), model.workbook().sheets().size(), now);
+    return new Planned(plan, planned.kept(), planned.replaced(), now);
   }
 
   private static void cut(Unit unit, CellRange cut, Map<Unit, List<CellRange>> rests) {

@@ -64,5 +64,6 @@ final class Scratch {
     }
     stretches.clear();
     frame.watcher = null;
+    runner.pointed().clear();
   }
 }

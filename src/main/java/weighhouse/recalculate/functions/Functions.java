@@ -17,6 +17,18 @@ public final class Functions {
           TextFunctions::enter,
           LookupFunctions::enter,
           ReferenceFunctions::enter,
+          ConditionalSums::enter,
+          Subtotals::enter,
+          StatisticsFunctions::enter,
+          RegressionFunctions::enter,
+          Matrices::enter,
+          Normal::enter,
+          Distributions::enter,
+          DiscreteDistributions::enter,
+          FinanceFunctions::enter,
+          DateFunctions::enter,
+          ArrayFunctions::enter,
+          LambdaFunctions::enter,
           RandomFunctions::enter);
 
   private static final Map<String, Function> TABLE = table();

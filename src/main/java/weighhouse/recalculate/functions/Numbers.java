@@ -26,6 +26,21 @@ final class Numbers {
     return numbers.toArray();
   }
 
+  /** All values of the arguments, text as 0 and truth values as 1 and 0; blanks skipped. */
+  static double[] all(Arguments a) {
+    Numbers numbers = new Numbers();
+    for (int i = 0; i < a.count(); i++) {
+      Grid grid = a.grid(i);
+      for (int k = 0; k < grid.usedRows() * grid.columns(); k++) {
+        Value value = Coerce.sound(grid.at(k));
+        if (!(value instanceof Value.Blank)) {
+          numbers.add(value instanceof Value.Text ? 0 : value.number());
+        }
+      }
+    }
+    return numbers.toArray();
+  }
+
   private void addArgument(Arguments a, int i) {
     if (a.isRange(i)) {
       addAll(a.grid(i));
