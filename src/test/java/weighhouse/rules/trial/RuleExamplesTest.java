@@ -41,7 +41,6 @@ class RuleExamplesTest {
   private static Subject plain(Workbook workbook, Declarations declarations) {
     Shapes shapes = ShapeIndex.of(workbook);
     PlainQuantities quantities = new PlainQuantities(workbook, shapes, declarations);
-    return new Subject(
-        workbook, shapes, quantities, Recalculations.compile(workbook, shapes));
+    return new Subject(workbook, shapes, quantities, Recalculations.compile(workbook, shapes));
   }
 }

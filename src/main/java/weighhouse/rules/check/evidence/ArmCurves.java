@@ -31,8 +31,7 @@ record ArmCurves(DataColumn first, DataColumn second, CurvePair pair) {
 
   static List<ArmCurves> in(List<DataColumn> table, ModelView model) {
     List<ArmCurves> found = new ArrayList<>();
-    DataColumn time =
-        table.stream().filter(c -> isTime(c, model)).findFirst().orElse(null);
+    DataColumn time = table.stream().filter(c -> isTime(c, model)).findFirst().orElse(null);
     if (time != null) {
       Map<String, List<DataColumn>> byEndpoint = new LinkedHashMap<>();
       for (DataColumn column : table) {
@@ -55,8 +54,7 @@ record ArmCurves(DataColumn first, DataColumn second, CurvePair pair) {
 
   private static boolean isSurvival(DataColumn column, ModelView model) {
     boolean told =
-        column.isHeaded(SURVIVAL)
-            || model.quantity(column.range().first()).kind() == Kind.SURVIVAL;
+        column.isHeaded(SURVIVAL) || model.quantity(column.range().first()).kind() == Kind.SURVIVAL;
     double[] figures = column.figures();
     boolean falls = figures[0] <= 1 && figures[0] > 0.7 && figures[figures.length - 1] >= 0;
     for (int i = 1; i < figures.length; i++) {

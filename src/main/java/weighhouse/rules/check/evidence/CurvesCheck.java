@@ -89,8 +89,7 @@ public final class CurvesCheck implements Check {
         .ifPresent(
             fit -> {
               CoxData cox = CoxData.ofArms(data.control(), data.treated());
-              double p =
-                  ProportionalHazardsTest.of(cox, fit, TimeTransform.KAPLAN_MEIER).p(0);
+              double p = ProportionalHazardsTest.of(cox, fit, TimeTransform.KAPLAN_MEIER).p(0);
               if (p < SUSPICIOUS) {
                 String said =
                     "The Grambsch-Therneau test on the patients' times gives P = "

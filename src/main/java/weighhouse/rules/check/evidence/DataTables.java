@@ -5,6 +5,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.SortedMap;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import weighhouse.workbook.CellKind;
@@ -28,7 +30,7 @@ final class DataTables {
   List<List<DataColumn>> all() {
     List<List<DataColumn>> tables = new ArrayList<>();
     for (int sheet = 0; sheet < workbook.sheets().size(); sheet++) {
-      for (Map.Entry<Rows, TreeSet<Integer>> entry : runs(workbook.sheet(sheet)).entrySet()) {
+      for (Map.Entry<Rows, SortedSet<Integer>> entry : runs(workbook.sheet(sheet)).entrySet()) {
         List<DataColumn> table = table(sheet, entry.getKey(), entry.getValue());
         if (table.size() > 1) {
           tables.add(table);
@@ -48,10 +50,10 @@ final class DataTables {
   }
 
   /** Columns in which typed-in numbers stand in unbroken runs, by the rows of the runs. */
-  private static TreeMap<Rows, TreeSet<Integer>> runs(Sheet sheet) {
+  private static SortedMap<Rows, SortedSet<Integer>> runs(Sheet sheet) {
     CellStore cells = sheet.cells();
     Map<Integer, Rows> open = new HashMap<>();
-    TreeMap<Rows, TreeSet<Integer>> closed = new TreeMap<>();
+    SortedMap<Rows, SortedSet<Integer>> closed = new TreeMap<>();
     for (int i = 0; i < cells.size(); i++) {
       if (cells.kind(i) == CellKind.NUMBER && !cells.hasFormula(i)) {
         int row = cells.row(i);
@@ -68,20 +70,19 @@ final class DataTables {
     return closed;
   }
 
-  private static void close(Rows run, int column, Map<Rows, TreeSet<Integer>> closed) {
+  private static void close(Rows run, int column, Map<Rows, SortedSet<Integer>> closed) {
     if (run.last() - run.first() + 1 >= LEAST_ROWS) {
       closed.computeIfAbsent(run, rows -> new TreeSet<>()).add(column);
     }
   }
 
-  private List<DataColumn> table(int sheet, Rows rows, TreeSet<Integer> numeric) {
+  private List<DataColumn> table(int sheet, Rows rows, SortedSet<Integer> numeric) {
     List<DataColumn> columns = new ArrayList<>();
     int from = Math.max(0, numeric.first() - WORDS_BESIDE);
     for (int column = from; column <= numeric.last() + WORDS_BESIDE; column++) {
       CellRange range = new CellRange(sheet, rows.first(), column, rows.last(), column);
       String heading = heading(range);
-      DataColumn found =
-          numeric.contains(column) ? figures(range, heading) : words(range, heading);
+      DataColumn found = numeric.contains(column) ? figures(range, heading) : words(range, heading);
       if (found != null) {
         columns.add(found);
       }

@@ -85,8 +85,7 @@ public final class FollowUpCheck implements Check {
         .map(range -> model.formula(range.first()))
         .anyMatch(
             formula ->
-                formula != null
-                    && Trees.contains(formula, node -> asksForTime(node, formula)));
+                formula != null && Trees.contains(formula, node -> asksForTime(node, formula)));
   }
 
   private static boolean asksForTime(Expr node, Expr formula) {

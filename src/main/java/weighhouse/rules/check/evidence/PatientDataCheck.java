@@ -75,8 +75,7 @@ public final class PatientDataCheck implements Check {
 
   private static boolean agrees(double ratio, RatioEstimate refit) {
     double half = 0.5000001 * Math.pow(10, -Math.max(LogSymmetry.decimals(ratio), 2));
-    double fitted =
-        Math.log(ratio) * refit.log() < 0 ? refit.reciprocal().ratio() : refit.ratio();
+    double fitted = Math.log(ratio) * refit.log() < 0 ? refit.reciprocal().ratio() : refit.ratio();
     return Math.abs(ratio - fitted) <= half + APART * fitted;
   }
 

@@ -19,8 +19,7 @@ public record Draw(
   /** The same draw from a log-normal distribution with these parameters. */
   public Expr logNormal(Expr newLocation, Expr newSpread) {
     if (standard != null) {
-      return Refs.call(
-          "EXP", Refs.plus(newLocation, Refs.times(newSpread, standard)));
+      return Refs.call("EXP", Refs.plus(newLocation, Refs.times(newSpread, standard)));
     }
     boolean named =
         Trees.inside(node) instanceof Expr.Call call && !call.function().equals("EXP") && logNormal;

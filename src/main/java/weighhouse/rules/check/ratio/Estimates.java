@@ -1,37 +1,61 @@
 package weighhouse.rules.check.ratio;
 
-import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import weighhouse.quantity.Kind;
 import weighhouse.quantity.Quantity;
 import weighhouse.quantity.Role;
 import weighhouse.workbook.CellAddress;
 
 /** The ratios of a workbook that stand beside their limits, in a row or in a column. */
 public final class Estimates {
-  private static final int PAIR_WITHIN = 3;
   private static final int ACROSS = 8;
   private static final int DOWN = 4;
+  private static final int APART = 3;
 
   private final ModelView model;
+  private final LimitWords words;
   private final Map<CellAddress, Estimate> byCell = new LinkedHashMap<>();
+  private final Map<CellAddress, Role> limits = new HashMap<>();
 
   public Estimates(ModelView model) {
     this.model = model;
-    for (CellAddress lower : model.cells(q -> Ratios.isRatio(q) && q.role() == Role.LOWER_LIMIT)) {
-      if (!inRow(lower)) {
-        inColumn(lower);
-      }
+    this.words = new LimitWords(model);
+    for (CellAddress cell : model.cells(Ratios::isLimit)) {
+      limits.put(cell, model.quantity(cell).role());
     }
+    Map<CellAddress, Near> nearest = new LinkedHashMap<>();
+    for (CellAddress cell : model.cells(Ratios::isEstimate)) {
+      near(cell)
+          .ifPresent(near -> nearest.merge(near.estimate().lower(), near, Estimates::better));
+    }
+    for (Near near : nearest.values()) {
+      Estimate estimate = near.estimate();
+      byCell.put(estimate.cell(), estimate);
+      limits.put(estimate.lower(), Role.LOWER_LIMIT);
+      limits.put(estimate.upper(), Role.UPPER_LIMIT);
+    }
+  }
+
+  /** A ratio with limits that may be nearer to another ratio. */
+  private record Near(Estimate estimate, boolean typed, int distance) {}
+
+  /** The live value beside a typed-in one may be a draw or a choice: what was typed has limits. */
+  private static Near better(Near a, Near b) {
+    if (a.typed() != b.typed()) {
+      return a.typed() ? a : b;
+    }
+    return b.distance() < a.distance() ? b : a;
   }
 
   public List<Estimate> all() {
     return List.copyOf(byCell.values());
   }
 
-  /** The interval of a ratio, or of the ratio that the cell only refers to. */
+  /** The interval of a ratio. */
   public Optional<Estimate> of(CellAddress cell) {
     return Optional.ofNullable(byCell.get(cell));
   }
@@ -43,44 +67,45 @@ public final class Estimates {
         .findFirst();
   }
 
-  private boolean inRow(CellAddress lower) {
-    return pair(lower, 0, 1, ACROSS, ACROSS);
+  /** Whether a cell is a limit of a ratio, and which; empty if none. */
+  public Optional<Role> limit(CellAddress cell) {
+    return Optional.ofNullable(limits.get(cell));
   }
 
-  private void inColumn(CellAddress lower) {
-    pair(lower, 1, 0, DOWN, 2);
+  /** All limits of ratios, in the workbook's order. */
+  public List<CellAddress> limits() {
+    return limits.keySet().stream().sorted().toList();
   }
 
-  private boolean pair(CellAddress lower, int down, int right, int before, int after) {
-    Quantity wanted = model.quantity(lower);
-    Optional<CellAddress> upper = nearest(lower, wanted, Role.UPPER_LIMIT, down, right);
-    if (upper.isEmpty()) {
-      return false;
+  private Optional<Near> near(CellAddress cell) {
+    if (!(model.value(cell) > 0)) {
+      return Optional.empty();
     }
-    List<CellAddress> estimates = new ArrayList<>();
-    for (int step = 1; step <= Math.max(before, after); step++) {
-      if (step <= before) {
-        add(lower.offset(-step * down, -step * right), wanted, estimates);
-      }
-      if (step <= after) {
-        add(lower.offset(step * down, step * right), wanted, estimates);
-      }
-    }
-    // The live value beside it may be a draw or a choice: what was typed in is what has limits.
-    Optional<CellAddress> typed =
-        estimates.stream().filter(cell -> model.formula(cell) == null).findFirst();
-    Optional<CellAddress> estimate = typed.or(() -> estimates.stream().findFirst());
-    estimate.ifPresent(e -> byCell.put(e, new Estimate(e, lower, upper.get())));
-    return estimate.isPresent();
+    return along(cell, 0, 1, ACROSS).or(() -> along(cell, 1, 0, DOWN));
   }
 
-  private Optional<CellAddress> nearest(
-      CellAddress from, Quantity like, Role role, int down, int right) {
-    for (int step = 1; step <= PAIR_WITHIN; step++) {
+  private Optional<Near> along(CellAddress cell, int down, int right, int reach) {
+    Quantity quantity = model.quantity(cell);
+    for (int step = 1; step <= reach; step++) {
       for (int sign : new int[] {1, -1}) {
-        CellAddress cell = from.offset(sign * step * down, sign * step * right);
-        Quantity quantity = quantityAt(cell);
-        if (quantity.kind() == like.kind() && quantity.role() == role) {
+        CellAddress lower = cell.offset(sign * step * down, sign * step * right);
+        if (isLimit(lower, Role.LOWER_LIMIT, quantity.kind())) {
+          Optional<CellAddress> upper = upper(lower, quantity.kind(), down, right);
+          if (upper.isPresent()) {
+            Estimate estimate = new Estimate(cell, lower, upper.get());
+            return Optional.of(new Near(estimate, model.formula(cell) == null, step));
+          }
+        }
+      }
+    }
+    return Optional.empty();
+  }
+
+  private Optional<CellAddress> upper(CellAddress lower, Kind kind, int down, int right) {
+    for (int step = 1; step <= APART; step++) {
+      for (int sign : new int[] {1, -1}) {
+        CellAddress cell = lower.offset(sign * step * down, sign * step * right);
+        if (isLimit(cell, Role.UPPER_LIMIT, kind)) {
           return Optional.of(cell);
         }
       }
@@ -88,16 +113,7 @@ public final class Estimates {
     return Optional.empty();
   }
 
-  private void add(CellAddress cell, Quantity like, List<CellAddress> found) {
-    Quantity quantity = quantityAt(cell);
-    if (quantity.kind() == like.kind()
-        && quantity.role() == Role.ESTIMATE
-        && model.value(cell) > 0) {
-      found.add(cell);
-    }
-  }
-
-  private Quantity quantityAt(CellAddress cell) {
-    return cell.row() < 0 || cell.column() < 0 ? Quantity.UNKNOWN : model.quantity(cell);
+  private boolean isLimit(CellAddress cell, Role role, Kind kind) {
+    return cell.row() >= 0 && cell.column() >= 0 && words.isLimit(cell, role, kind);
   }
 }

@@ -36,13 +36,7 @@ public final class Found {
   /** The same rule at another severity: major, minor, query. */
   public static Rule as(String level, Rule rule) {
     return new Rule(
-        rule.id(),
-        rule.family(),
-        rule.title(),
-        level,
-        rule.explain(),
-        rule.ask(),
-        rule.sources());
+        rule.id(), rule.family(), rule.title(), level, rule.explain(), rule.ask(), rule.sources());
   }
 
   /** One node of the formula is wrong, and what should stand for it. */
@@ -69,7 +63,6 @@ public final class Found {
   }
 
   public Match match() {
-    return new Match(
-        rule, List.of(cells), cells.first(), offending, suggestion, operands, notes);
+    return new Match(rule, List.of(cells), cells.first(), offending, suggestion, operands, notes);
   }
 }

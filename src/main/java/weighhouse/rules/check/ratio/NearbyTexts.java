@@ -7,7 +7,9 @@ import weighhouse.workbook.CellKind;
 import weighhouse.workbook.CellStore;
 import weighhouse.workbook.Workbook;
 
-/** The texts that a reader of a cell has before the eyes: beside it and at the head of its column. */
+/**
+ * The texts that a reader of a cell has before the eyes: beside it and at the head of its column.
+ */
 public final class NearbyTexts {
   private static final int ACROSS = 10;
   private static final int UP = 60;
@@ -58,8 +60,7 @@ public final class NearbyTexts {
     }
     CellStore cells = workbook.sheet(sheet).cells();
     int index = cells.find(row, column);
-    boolean text =
-        index >= 0 && cells.kind(index) == CellKind.TEXT && !cells.text(index).isBlank();
+    boolean text = index >= 0 && cells.kind(index) == CellKind.TEXT && !cells.text(index).isBlank();
     if (text) {
       texts.add(cells.text(index));
     }

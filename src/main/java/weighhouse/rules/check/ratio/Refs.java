@@ -20,7 +20,8 @@ public final class Refs {
   /**
    * A reference to a cell as the host writes it.
    *
-   * @param like a reference whose dollar signs are to be kept where it is one to a cell; may be null
+   * @param like a reference whose dollar signs are to be kept where it is one to a cell; may be
+   *     null
    */
   public static Expr to(CellAddress cell, CellAddress host, Workbook workbook, Expr like) {
     SheetRef sheet =

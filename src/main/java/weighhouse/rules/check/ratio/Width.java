@@ -17,14 +17,14 @@ import weighhouse.workbook.CellAddress;
  * @param divisor the number, its present value
  * @param whole whether both are limits
  */
-public record Width(
-    Expr node, Expr high, Expr low, boolean logs, double divisor, boolean whole) {
+public record Width(Expr node, Expr high, Expr low, boolean logs, double divisor, boolean whole) {
   private static final Set<String> LN = Set.of("LN");
   private static final double LEAST = 1;
   private static final double MOST = 7;
 
   /** Reads a node of a formula in the host. */
-  public static Optional<Width> of(Expr node, CellAddress host, ModelView model) {
+  public static Optional<Width> of(
+      Expr node, CellAddress host, ModelView model, Estimates estimates) {
     if (!(node instanceof Expr.Binary)) {
       return Optional.empty();
     }
@@ -35,12 +35,17 @@ public record Width(
       rest = Parts.left(rest);
     }
     return divisor >= LEAST && divisor <= MOST && divisor != 1
-        ? difference(node, rest, divisor, host, model)
+        ? difference(node, rest, divisor, host, model, estimates)
         : Optional.empty();
   }
 
   private static Optional<Width> difference(
-      Expr node, Expr rest, double divisor, CellAddress host, ModelView model) {
+      Expr node,
+      Expr rest,
+      double divisor,
+      CellAddress host,
+      ModelView model,
+      Estimates estimates) {
     boolean quotient = Parts.calls(rest, LN, 1);
     Expr inner = quotient ? Parts.argument(rest, 0) : rest;
     if (!Parts.is(inner, quotient ? BinaryOp.DIVIDE : BinaryOp.SUBTRACT)) {
@@ -54,13 +59,22 @@ public record Width(
       low = Parts.argument(low, 0);
       logs = true;
     }
-    boolean highLimit = Ratios.isLimit(model.quantity(high, host));
-    boolean lowLimit = Ratios.isLimit(model.quantity(low, host));
-    boolean both =
-        Ratios.isRatio(model.quantity(high, host)) && Ratios.isRatio(model.quantity(low, host));
-    return both && (highLimit || lowLimit)
+    CellAddress highCell = model.cell(high, host);
+    CellAddress lowCell = model.cell(low, host);
+    if (!isFigure(highCell, model, estimates) || !isFigure(lowCell, model, estimates)) {
+      return Optional.empty();
+    }
+    boolean highLimit = estimates.limit(highCell).isPresent();
+    boolean lowLimit = estimates.limit(lowCell).isPresent();
+    return highLimit || lowLimit
         ? Optional.of(new Width(node, high, low, logs, divisor, highLimit && lowLimit))
         : Optional.empty();
+  }
+
+  /** A ratio or a limit of one. */
+  private static boolean isFigure(CellAddress cell, ModelView model, Estimates estimates) {
+    return cell != null
+        && (estimates.limit(cell).isPresent() || Ratios.isRatio(model.quantity(cell)));
   }
 
   /** The same width taken between logarithms. */

@@ -1,9 +1,11 @@
 package weighhouse.rules.check.synthesis;
 
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import weighhouse.formula.BinaryOp;
 import weighhouse.formula.Expr;
 import weighhouse.quantity.Quantity;
@@ -51,8 +53,12 @@ public final class IndirectComparisonCheck implements Check {
       for (Place place : model.placesOf(Ratios::isRatio)) {
         for (Expr result : Parts.results(place.tree())) {
           difference(place, result);
-          limits(place, result);
         }
+      }
+      Set<Place> limits = new LinkedHashSet<>();
+      estimates.limits().forEach(cell -> model.place(cell).ifPresent(limits::add));
+      for (Place place : limits) {
+        Parts.results(place.tree()).forEach(result -> limits(place, result));
       }
       for (Place place : model.placesOf(Ratios::isStandardError)) {
         Parts.results(place.tree()).forEach(result -> errors(place, result));
@@ -91,7 +97,7 @@ public final class IndirectComparisonCheck implements Check {
 
     /** A limit of one ratio divided by a limit of another, in the cell of a limit. */
     private void limits(Place place, Expr node) {
-      if (!Parts.is(node, BinaryOp.DIVIDE) || !Ratios.isLimit(model.quantity(place.host()))) {
+      if (!Parts.is(node, BinaryOp.DIVIDE)) {
         return;
       }
       Optional<Estimate> over = ofLimit(Parts.left(node), place.host());
@@ -126,7 +132,7 @@ public final class IndirectComparisonCheck implements Check {
                   Refs.plus(
                       Refs.square(width(over, host, book)), Refs.square(width(under, host, book)))),
               Refs.number("2"));
-      boolean lower = model.quantity(host).role() == Role.LOWER_LIMIT;
+      boolean lower = estimates.limit(host).equals(Optional.of(Role.LOWER_LIMIT));
       Expr middle = Refs.call("LN", quotient);
       return Refs.call("EXP", lower ? Refs.minus(middle, half) : Refs.plus(middle, half));
     }
@@ -134,8 +140,7 @@ public final class IndirectComparisonCheck implements Check {
     private static Expr width(Estimate estimate, CellAddress host, Workbook book) {
       return Refs.call(
           "LN",
-          Refs.over(
-              Refs.to(estimate.upper(), host, book), Refs.to(estimate.lower(), host, book)));
+          Refs.over(Refs.to(estimate.upper(), host, book), Refs.to(estimate.lower(), host, book)));
     }
 
     /** {@code se1 - se2} in the cell of a standard error. */
@@ -178,8 +183,7 @@ public final class IndirectComparisonCheck implements Check {
           return true;
         }
       }
-      Quantity above =
-          error.row() == 0 ? Quantity.UNKNOWN : model.quantity(error.offset(-1, 0));
+      Quantity above = error.row() == 0 ? Quantity.UNKNOWN : model.quantity(error.offset(-1, 0));
       return Ratios.isEstimate(above) || Ratios.isLog(above);
     }
   }

@@ -7,26 +7,17 @@ import java.util.Set;
 import weighhouse.formula.BinaryOp;
 import weighhouse.formula.Expr;
 import weighhouse.formula.Trees;
-import weighhouse.quantity.Kind;
-import weighhouse.quantity.Quantity;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.Parts;
-import weighhouse.rules.check.ratio.Ratios;
 import weighhouse.rules.check.ratio.Refs;
 import weighhouse.workbook.CellAddress;
-import weighhouse.workbook.CellRange;
 
 /** The ways in which formulas write the mean of several ratios. */
 final class MeanForms {
-  /** More than this are the draws of one ratio or its course over time. */
-  private static final int MOST_STUDIES = 40;
-
-  private static final Set<Kind> SHARES = Set.of(Kind.PROPORTION, Kind.OCCUPANCY);
-
-  private final ModelView model;
+  private final RatioOperands operands;
 
   MeanForms(ModelView model) {
-    this.model = model;
+    this.operands = new RatioOperands(model);
   }
 
   /**
@@ -60,7 +51,7 @@ final class MeanForms {
   private Optional<Mean> average(Expr.Call call, CellAddress host) {
     boolean several =
         call.arguments().size() > 1 || call.arguments().get(0) instanceof Expr.AreaRef;
-    return several && call.arguments().stream().allMatch(a -> areRatios(a, host))
+    return several && call.arguments().stream().allMatch(a -> operands.areRatios(a, host))
         ? mean(call.arguments().get(0), new Expr.Call("GEOMEAN", call.arguments()))
         : Optional.empty();
   }
@@ -75,22 +66,24 @@ final class MeanForms {
     Expr below = Parts.right(node);
     if (Parts.calls(above, Set.of("SUMPRODUCT"), 2)) {
       return Parts.calls(below, Set.of("SUM"), 1)
-          ? sumProduct(above, host).map(m -> over(m, above, node))
+          ? sumProduct(above, host).map(m -> over(m, node))
           : Optional.empty();
     }
     List<Parts.Addend> addends = Parts.addends(above);
     boolean count =
         below instanceof Expr.Num number && number.value() == addends.size() && addends.size() > 1;
-    return count && addends.stream().allMatch(a -> !a.negative() && areRatios(a.node(), host))
+    return count && addends.stream().allMatch(a -> !a.negative() && operands.areRatios(a.node(), host))
         ? mean(addends.get(0).node(), exp(Refs.over(sum(logs(addends)), below)))
         : Optional.empty();
   }
 
-  /** A sum of products taken as part of a quotient: the whole quotient goes into the exponential. */
-  private static Mean over(Mean inner, Expr above, Expr node) {
+  /**
+   * A sum of products taken as part of a quotient: the whole quotient goes into the exponential.
+   */
+  private static Mean over(Mean inner, Expr node) {
     Expr.Call exp = (Expr.Call) inner.onLogScale();
     Expr corrected = exp(Refs.over(exp.arguments().get(0), Parts.right(node)));
-    return new Mean(inner.ratios(), corrected, inner.ofPatients() && above != null);
+    return new Mean(inner.ratios(), corrected, inner.ofPatients());
   }
 
   /** {@code SUMPRODUCT(w, R)} where the weights are shares. */
@@ -103,18 +96,16 @@ final class MeanForms {
   private Optional<Mean> sumProduct(Expr node, CellAddress host) {
     Expr first = Parts.argument(node, 0);
     Expr second = Parts.argument(node, 1);
-    boolean secondIs = areRatios(second, host);
+    boolean secondIs = operands.areRatios(second, host);
     Expr ratios = secondIs ? second : first;
     Expr weights = secondIs ? first : second;
-    if (!areRatios(ratios, host) || areRatios(weights, host) || isEvent(weights, host)) {
+    if (!operands.areRatios(ratios, host) || operands.areRatios(weights, host) || operands.isEvent(weights, host)) {
       return Optional.empty();
     }
     Expr logs = Refs.ln(ratios);
     Expr product =
-        secondIs
-            ? Refs.call("SUMPRODUCT", weights, logs)
-            : Refs.call("SUMPRODUCT", logs, weights);
-    return Optional.of(new Mean(ratios, exp(product), isShare(weights, host)));
+        secondIs ? Refs.call("SUMPRODUCT", weights, logs) : Refs.call("SUMPRODUCT", logs, weights);
+    return Optional.of(new Mean(ratios, exp(product), operands.isShare(weights, host)));
   }
 
   /** {@code w*R1 + (1-w)*R2}, or with weights of their own. */
@@ -134,90 +125,18 @@ final class MeanForms {
       logs.add(
           place == 0 ? Refs.times(Refs.ln(ratio), weight) : Refs.times(weight, Refs.ln(ratio)));
     }
-    boolean whole = logs.size() > 1 && sumsToOne(weights, host);
-    boolean shares = weights.stream().anyMatch(w -> isShare(w, host));
+    boolean whole = logs.size() > 1 && operands.sumsToOne(weights, host);
+    boolean shares = weights.stream().anyMatch(w -> operands.isShare(w, host));
     return whole ? Optional.of(new Mean(ratio, exp(sum(logs)), shares)) : Optional.empty();
   }
 
   private int ratioOf(List<Expr> factors, CellAddress host) {
-    boolean first = isRatioCell(factors.get(0), host);
-    boolean second = isRatioCell(factors.get(1), host);
-    if (first == second || isEvent(factors.get(first ? 1 : 0), host)) {
+    boolean first = operands.isRatioCell(factors.get(0), host);
+    boolean second = operands.isRatioCell(factors.get(1), host);
+    if (first == second || operands.isEvent(factors.get(first ? 1 : 0), host)) {
       return -1;
     }
     return first ? 0 : 1;
-  }
-
-  private boolean isRatioCell(Expr node, CellAddress host) {
-    return model.cell(node, host) != null && Ratios.isRatio(model.quantity(node, host));
-  }
-
-  private boolean sumsToOne(List<Expr> weights, CellAddress host) {
-    double total = weights.stream().mapToDouble(w -> model.value(w, host)).sum();
-    return Math.abs(total - 1) < 1e-6;
-  }
-
-  private boolean isShare(Expr weights, CellAddress host) {
-    Expr.AreaRef area = weights instanceof Expr.AreaRef a ? a : null;
-    Quantity quantity =
-        area == null ? model.quantity(weights, host) : model.quantity(range(area, host).first());
-    return SHARES.contains(quantity.kind());
-  }
-
-  /** A sum of rates each with a ratio of its own is no mean. */
-  private boolean isEvent(Expr weights, CellAddress host) {
-    Kind kind = model.quantity(weights, host).kind();
-    return kind == Kind.RATE
-        || kind == Kind.PROBABILITY
-        || kind == Kind.CUMULATIVE_HAZARD
-        || kind == Kind.COST
-        || kind == Kind.UTILITY;
-  }
-
-  /** One ratio, or a range of several that are not one ratio's draws or course. */
-  private boolean areRatios(Expr node, CellAddress host) {
-    if (!(node instanceof Expr.AreaRef area)) {
-      return isRatioCell(node, host);
-    }
-    CellRange range = range(area, host);
-    if (range == null || range.size() < 2 || range.size() > MOST_STUDIES) {
-      return false;
-    }
-    for (int row = range.firstRow(); row <= range.lastRow(); row++) {
-      for (int column = range.firstColumn(); column <= range.lastColumn(); column++) {
-        CellAddress cell = new CellAddress(range.sheet(), row, column);
-        if (!Ratios.isEstimate(model.quantity(cell)) || isCourse(cell, range)) {
-          return false;
-        }
-      }
-    }
-    return true;
-  }
-
-  /** Whether a formula fills the range: a ratio over time, or repeated draws. */
-  private boolean isCourse(CellAddress cell, CellRange range) {
-    return model.place(cell).map(place -> place.range().size() >= range.size()).orElse(false)
-        && Trees.contains(
-            model.formula(cell),
-            n ->
-                n instanceof Expr.CellRef ref
-                    && ref.row().absolute()
-                    && ref.column().absolute());
-  }
-
-  private CellRange range(Expr.AreaRef area, CellAddress host) {
-    int sheet =
-        area.sheet() == null
-            ? host.sheet()
-            : model.subject().workbook().sheetIndex(area.sheet().first());
-    return sheet < 0
-        ? null
-        : new CellRange(
-            sheet,
-            area.row1().resolve(host.row()),
-            area.column1().resolve(host.column()),
-            area.row2().resolve(host.row()),
-            area.column2().resolve(host.column()));
   }
 
   private static List<Expr> logs(List<Parts.Addend> addends) {

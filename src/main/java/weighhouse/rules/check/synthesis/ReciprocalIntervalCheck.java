@@ -14,7 +14,6 @@ import weighhouse.rules.check.ratio.Estimates;
 import weighhouse.rules.check.ratio.Found;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.Place;
-import weighhouse.rules.check.ratio.Ratios;
 import weighhouse.rules.check.ratio.Refs;
 import weighhouse.workbook.CellAddress;
 
@@ -30,13 +29,15 @@ public final class ReciprocalIntervalCheck implements Check {
     ModelView model = new ModelView(subject);
     Estimates estimates = new Estimates(model);
     List<Match> matches = new ArrayList<>();
-    for (Place place : model.placesOf(Ratios::isLimit)) {
-      Role role = model.quantity(place.host()).role();
-      Reciprocal.of(place.host(), model)
-          .filter(r -> Ratios.isRatio(model.quantity(r.cell())))
-          .filter(r -> model.quantity(r.cell()).role() == role)
-          .map(r -> match(rule, place, r, estimates, model))
-          .ifPresent(matches::add);
+    for (CellAddress limit : estimates.limits()) {
+      Optional<Place> place = model.place(limit).filter(p -> p.host().equals(limit));
+      if (place.isPresent()) {
+        Optional<Role> role = estimates.limit(limit);
+        Reciprocal.of(limit, model)
+            .filter(r -> estimates.limit(r.cell()).equals(role))
+            .map(r -> match(rule, place.get(), r, estimates, model))
+            .ifPresent(matches::add);
+      }
     }
     return matches;
   }

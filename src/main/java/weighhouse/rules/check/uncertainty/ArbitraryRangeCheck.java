@@ -79,9 +79,7 @@ public final class ArbitraryRangeCheck implements Check {
 
   private static Optional<RangeFactor> moved(CellAddress limit, ModelView model) {
     Expr formula = model.formula(limit);
-    return formula == null
-        ? Optional.empty()
-        : RangeFactor.of(Trees.inside(formula), limit, model);
+    return formula == null ? Optional.empty() : RangeFactor.of(Trees.inside(formula), limit, model);
   }
 
   private static boolean mirrored(List<Moved> both) {
@@ -95,8 +93,7 @@ public final class ArbitraryRangeCheck implements Check {
   private static Match match(Rule rule, Moved moved, Estimate interval, Subject subject) {
     CellAddress host = moved.place().host();
     Expr limit =
-        Refs.to(
-            moved.factor() < 1 ? interval.lower() : interval.upper(), host, subject.workbook());
+        Refs.to(moved.factor() < 1 ? interval.lower() : interval.upper(), host, subject.workbook());
     return Found.at(rule, moved.place())
         .replacing(moved.place().tree(), moved.place().tree(), limit)
         .with("r", Refs.to(moved.ratio(), host, subject.workbook()))

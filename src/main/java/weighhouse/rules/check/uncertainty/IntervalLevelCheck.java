@@ -3,9 +3,11 @@ package weighhouse.rules.check.uncertainty;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Stream;
 import weighhouse.effect.StandardNormal;
 import weighhouse.formula.BinaryOp;
@@ -15,13 +17,13 @@ import weighhouse.rules.Check;
 import weighhouse.rules.Match;
 import weighhouse.rules.Rule;
 import weighhouse.rules.Subject;
+import weighhouse.rules.check.ratio.Estimates;
 import weighhouse.rules.check.ratio.Found;
 import weighhouse.rules.check.ratio.IntervalLevel;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.NearbyTexts;
 import weighhouse.rules.check.ratio.Parts;
 import weighhouse.rules.check.ratio.Place;
-import weighhouse.rules.check.ratio.Ratios;
 import weighhouse.rules.check.ratio.Refs;
 import weighhouse.rules.check.ratio.Width;
 import weighhouse.workbook.CellAddress;
@@ -46,30 +48,31 @@ public final class IntervalLevelCheck implements Check {
 
     private final ModelView model;
     private final Rule rule;
+    private final Estimates estimates;
     private final IntervalLevel levels;
     private final List<Match> matches = new ArrayList<>();
 
     Search(ModelView model, Rule rule) {
       this.model = model;
       this.rule = rule;
+      this.estimates = new Estimates(model);
       this.levels = new IntervalLevel(new NearbyTexts(model.subject().workbook()));
     }
 
     List<Match> all() {
       for (Place place : model.places(Search::divides)) {
         for (Expr node : Trees.walk(place.tree())) {
-          Width.of(node, place.host(), model).ifPresent(width -> width(place, width));
+          Width.of(node, place.host(), model, estimates).ifPresent(width -> width(place, width));
         }
       }
-      for (Place place : model.placesOf(Ratios::isLimit)) {
-        limit(place);
-      }
+      Set<Place> limits = new LinkedHashSet<>();
+      estimates.limits().forEach(cell -> model.place(cell).ifPresent(limits::add));
+      limits.forEach(this::limit);
       return matches;
     }
 
     private static boolean divides(Expr tree) {
-      return Trees.contains(
-          tree, n -> n instanceof Expr.Binary b && b.op() == BinaryOp.DIVIDE);
+      return Trees.contains(tree, n -> n instanceof Expr.Binary b && b.op() == BinaryOp.DIVIDE);
     }
 
     private void width(Place place, Width width) {
@@ -78,7 +81,7 @@ public final class IntervalLevelCheck implements Check {
           levels.of(
               Stream.of(width.high(), width.low())
                   .map(figure -> model.cell(figure, place.host()))
-                  .filter(cell -> cell != null && Ratios.isLimit(model.quantity(cell)))
+                  .filter(cell -> cell != null && estimates.limit(cell).isPresent())
                   .toList());
       if (told.isPresent()) {
         double expected = sides * StandardNormal.multiplier(told.get());

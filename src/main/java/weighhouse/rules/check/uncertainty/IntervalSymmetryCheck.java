@@ -5,7 +5,9 @@ import weighhouse.effect.estimate.LogSymmetry;
 import weighhouse.formula.Expr;
 import weighhouse.formula.Trees;
 import weighhouse.rules.check.ratio.Estimate;
+import weighhouse.rules.check.ratio.IntervalLevel;
 import weighhouse.rules.check.ratio.ModelView;
+import weighhouse.rules.check.ratio.NearbyTexts;
 import weighhouse.workbook.CellAddress;
 
 /** Limits that are not equally far from their ratio on the log scale, beyond rounding. */
@@ -48,7 +50,13 @@ public final class IntervalSymmetryCheck extends IntervalCheck {
     boolean plain =
         PLAIN_RANGES.stream()
             .anyMatch(p -> Math.abs(down - p) <= slack && Math.abs(up - p) <= slack);
-    return plain || isShare(estimate.lower(), model) || isShare(estimate.upper(), model);
+    boolean share = isShare(estimate.lower(), model) || isShare(estimate.upper(), model);
+    return (plain || share) && !saysInterval(estimate, model);
+  }
+
+  private static boolean saysInterval(Estimate estimate, ModelView model) {
+    IntervalLevel level = new IntervalLevel(new NearbyTexts(model.subject().workbook()));
+    return level.of(List.of(estimate.lower(), estimate.upper())).isPresent();
   }
 
   private static boolean isShare(CellAddress limit, ModelView model) {

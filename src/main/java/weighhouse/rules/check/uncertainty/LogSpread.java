@@ -34,7 +34,7 @@ final class LogSpread {
   record Spread(Expr expression, String assumption) {}
 
   Spread of(Draw draw, CellAddress host) {
-    Optional<Width> width = Width.of(draw.spread(), host, model);
+    Optional<Width> width = Width.of(draw.spread(), host, model, estimates);
     if (width.isPresent()) {
       return new Spread(
           width.get().logs() ? draw.spread() : width.get().onLogScale(),

@@ -13,6 +13,7 @@ import weighhouse.rules.Rule;
 import weighhouse.rules.Subject;
 import weighhouse.rules.check.ratio.Draw;
 import weighhouse.rules.check.ratio.Draws;
+import weighhouse.rules.check.ratio.Estimates;
 import weighhouse.rules.check.ratio.Found;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.Parts;
@@ -38,11 +39,13 @@ public final class NaturalErrorCheck implements Check {
   private static final class Search {
     private final ModelView model;
     private final Rule rule;
+    private final Estimates estimates;
     private final Map<CellAddress, Match> matches = new LinkedHashMap<>();
 
     Search(ModelView model, Rule rule) {
       this.model = model;
       this.rule = rule;
+      this.estimates = new Estimates(model);
     }
 
     List<Match> all() {
@@ -96,7 +99,7 @@ public final class NaturalErrorCheck implements Check {
     /** Follows a standard error to the formula that makes it. */
     private void trace(Expr spread, Place place, int depth) {
       for (Expr result : Parts.results(spread)) {
-        Optional<Width> width = Width.of(result, place.host(), model);
+        Optional<Width> width = Width.of(result, place.host(), model, estimates);
         CellAddress cell = model.cell(result, place.host());
         if (width.isPresent() && !width.get().logs()) {
           matches.computeIfAbsent(place.host(), host -> match(place, width.get()));

@@ -20,7 +20,8 @@ record Printed(double ratio, double lower, double upper, int decimals) {
     int own = LogSymmetry.decimals(ratio);
     int limits = Math.max(LogSymmetry.decimals(lower), LogSymmetry.decimals(upper));
     // 0.7 beside 0.55 was 0.70; a last zero is not stored.
-    int decimals = Math.min(Math.max(own, Math.min(limits, SHOWN)), Math.max(limits, Math.min(own, SHOWN)));
+    int decimals =
+        Math.min(Math.max(own, Math.min(limits, SHOWN)), Math.max(limits, Math.min(own, SHOWN)));
     return new Printed(ratio, lower, upper, Math.min(decimals, MOST));
   }
 

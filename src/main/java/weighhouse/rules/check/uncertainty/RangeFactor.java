@@ -46,7 +46,6 @@ record RangeFactor(Expr ratio, double factor) {
         Parts.addends(share).size() == 2
             && Parts.addends(share).get(0).node() instanceof Expr.Num one
             && one.value() == 1;
-    return Parts.isConstant(share)
-        || (aroundOne && Trees.count(share, Parts::refers) == 1);
+    return Parts.isConstant(share) || (aroundOne && Trees.count(share, Parts::refers) == 1);
   }
 }

@@ -100,7 +100,8 @@ public final class UnusedDrawCheck implements Check {
 
   /** A ratio that something else than the draw itself decides on, such as a live value. */
   private static boolean isLive(CellAddress cell, ModelView model) {
-    return Ratios.isRatio(model.quantity(cell)) && model.quantity(cell).role() == Role.ESTIMATE
+    return Ratios.isRatio(model.quantity(cell))
+        && model.quantity(cell).role() == Role.ESTIMATE
         && !model.subject().recalculation().dependents(Set.of(cell)).isEmpty();
   }
 

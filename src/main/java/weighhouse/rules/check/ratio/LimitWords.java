@@ -1,0 +1,53 @@
+package weighhouse.rules.check.ratio;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.regex.Pattern;
+import weighhouse.quantity.Kind;
+import weighhouse.quantity.Quantity;
+import weighhouse.quantity.Role;
+import weighhouse.workbook.CellAddress;
+
+/** Whether a number is a limit, by its quantity or, where none is known, by the words at it. */
+final class LimitWords {
+  private static final Pattern LOWER = Pattern.compile("(?i)\\b(lower|lcl|lci)\\b|^(low|ll|lo|min)$");
+  private static final Pattern UPPER = Pattern.compile("(?i)\\b(upper|ucl|uci)\\b|^(high|ul|hi|max)$");
+
+  private final ModelView model;
+  private final NearbyTexts texts;
+
+  LimitWords(ModelView model) {
+    this.model = model;
+    this.texts = new NearbyTexts(model.subject().workbook());
+  }
+
+  /** Whether the cell can be that limit of a ratio of the kind. */
+  boolean isLimit(CellAddress cell, Role role, Kind kind) {
+    Quantity quantity = model.quantity(cell);
+    if (!(model.value(cell) > 0) || !(quantity.kind() == kind || isOpen(quantity))) {
+      return false;
+    }
+    return quantity.role() == role || (isOpen(quantity) && says(cell, role));
+  }
+
+  private static boolean isOpen(Quantity quantity) {
+    return quantity.kind() == Kind.UNKNOWN;
+  }
+
+  private boolean says(CellAddress cell, Role role) {
+    List<String> words = new ArrayList<>();
+    words.add(model.subject().quantities().label(cell));
+    texts.beside(cell, words);
+    texts.above(cell, words);
+    Pattern wanted = role == Role.LOWER_LIMIT ? LOWER : UPPER;
+    Pattern other = role == Role.LOWER_LIMIT ? UPPER : LOWER;
+    for (String text : words) {
+      boolean yes = wanted.matcher(text.strip()).find();
+      boolean no = other.matcher(text.strip()).find();
+      if (yes != no) {
+        return yes; // the nearest words that tell one from the other decide
+      }
+    }
+    return false;
+  }
+}
