@@ -1,5 +1,6 @@
 package weighhouse.rules.check.synthesis;
 
+import java.util.List;
 import java.util.Set;
 import weighhouse.formula.Expr;
 import weighhouse.formula.Trees;

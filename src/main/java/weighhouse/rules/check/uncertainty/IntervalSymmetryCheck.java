@@ -47,8 +47,11 @@ public final class IntervalSymmetryCheck extends IntervalCheck {
     double down = 1 - printed.lower() / printed.ratio();
     double up = printed.upper() / printed.ratio() - 1;
     double slack = printed.half() / printed.ratio();
+    boolean typed =
+        model.formula(estimate.lower()) == null && model.formula(estimate.upper()) == null;
     boolean plain =
-        PLAIN_RANGES.stream()
+        typed
+            && PLAIN_RANGES.stream()
             .anyMatch(p -> Math.abs(down - p) <= slack && Math.abs(up - p) <= slack);
     boolean share = isShare(estimate.lower(), model) || isShare(estimate.upper(), model);
     return (plain || share) && !saysInterval(estimate, model);
