@@ -29,8 +29,7 @@ public final class Estimates {
     }
     Map<CellAddress, Near> nearest = new LinkedHashMap<>();
     for (CellAddress cell : model.cells(Ratios::isEstimate)) {
-      near(cell)
-          .ifPresent(near -> nearest.merge(near.estimate().lower(), near, Estimates::better));
+      near(cell).ifPresent(near -> nearest.merge(near.estimate().lower(), near, Estimates::better));
     }
     for (Near near : nearest.values()) {
       Estimate estimate = near.estimate();
@@ -89,7 +88,7 @@ public final class Estimates {
     for (int step = 1; step <= reach; step++) {
       for (int sign : new int[] {1, -1}) {
         CellAddress lower = cell.offset(sign * step * down, sign * step * right);
-        if (isLimit(lower, Role.LOWER_LIMIT, quantity.kind())) {
+        if (isLimit(lower, Role.LOWER_LIMIT, quantity.kind(), down == 0)) {
           Optional<CellAddress> upper = upper(lower, quantity.kind(), down, right);
           if (upper.isPresent()) {
             Estimate estimate = new Estimate(cell, lower, upper.get());
@@ -105,7 +104,7 @@ public final class Estimates {
     for (int step = 1; step <= APART; step++) {
       for (int sign : new int[] {1, -1}) {
         CellAddress cell = lower.offset(sign * step * down, sign * step * right);
-        if (isLimit(cell, Role.UPPER_LIMIT, kind)) {
+        if (isLimit(cell, Role.UPPER_LIMIT, kind, down == 0)) {
           return Optional.of(cell);
         }
       }
@@ -113,7 +112,7 @@ public final class Estimates {
     return Optional.empty();
   }
 
-  private boolean isLimit(CellAddress cell, Role role, Kind kind) {
-    return cell.row() >= 0 && cell.column() >= 0 && words.isLimit(cell, role, kind);
+  private boolean isLimit(CellAddress cell, Role role, Kind kind, boolean beside) {
+    return cell.row() >= 0 && cell.column() >= 0 && words.isLimit(cell, role, kind, beside);
   }
 }

@@ -72,7 +72,8 @@ final class MeanForms {
     List<Parts.Addend> addends = Parts.addends(above);
     boolean count =
         below instanceof Expr.Num number && number.value() == addends.size() && addends.size() > 1;
-    return count && addends.stream().allMatch(a -> !a.negative() && operands.areRatios(a.node(), host))
+    return count
+            && addends.stream().allMatch(a -> !a.negative() && operands.areRatios(a.node(), host))
         ? mean(addends.get(0).node(), exp(Refs.over(sum(logs(addends)), below)))
         : Optional.empty();
   }
@@ -99,7 +100,9 @@ final class MeanForms {
     boolean secondIs = operands.areRatios(second, host);
     Expr ratios = secondIs ? second : first;
     Expr weights = secondIs ? first : second;
-    if (!operands.areRatios(ratios, host) || operands.areRatios(weights, host) || operands.isEvent(weights, host)) {
+    if (!operands.areRatios(ratios, host)
+        || operands.areRatios(weights, host)
+        || operands.isEvent(weights, host)) {
       return Optional.empty();
     }
     Expr logs = Refs.ln(ratios);

@@ -10,11 +10,11 @@ import weighhouse.rules.Subject;
 import weighhouse.rules.check.ratio.Draw;
 import weighhouse.rules.check.ratio.Draws;
 import weighhouse.rules.check.ratio.Found;
+import weighhouse.rules.check.ratio.Logarithms;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.Place;
 import weighhouse.rules.check.ratio.Ratios;
 import weighhouse.rules.check.ratio.Refs;
-import weighhouse.workbook.CellAddress;
 
 /**
  * Draws whose mean is a ratio where its logarithm should stand. Parameter {@code distribution}:
@@ -32,21 +32,19 @@ public final class DrawnScaleCheck implements Check {
     ModelView model = new ModelView(subject);
     Draws draws = new Draws(model);
     LogSpread spreads = new LogSpread(model);
+    Logarithms logarithms = new Logarithms(model);
     List<Match> matches = new ArrayList<>();
     for (Place place : model.places(Draws::mayDraw)) {
       for (Draw draw : draws.in(place)) {
-        if (draw.logNormal() == logNormal && hasRatioForMean(draw, place.host(), model)) {
+        boolean ratio =
+            Ratios.isRatio(model.quantity(draw.location(), place.host()))
+                && !logarithms.isLog(draw.location(), place.host());
+        if (draw.logNormal() == logNormal && ratio) {
           matches.add(match(rule, place, draw, spreads));
         }
       }
     }
     return matches;
-  }
-
-  private static boolean hasRatioForMean(Draw draw, CellAddress host, ModelView model) {
-    // A logarithm below 0 in a row labelled as the ratio is told by its sign.
-    return Ratios.isRatio(model.quantity(draw.location(), host))
-        && !(model.value(draw.location(), host) <= 0);
   }
 
   private static Match match(Rule rule, Place place, Draw draw, LogSpread spreads) {

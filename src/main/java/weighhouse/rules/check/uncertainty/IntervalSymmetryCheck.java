@@ -52,7 +52,7 @@ public final class IntervalSymmetryCheck extends IntervalCheck {
     boolean plain =
         typed
             && PLAIN_RANGES.stream()
-            .anyMatch(p -> Math.abs(down - p) <= slack && Math.abs(up - p) <= slack);
+                .anyMatch(p -> Math.abs(down - p) <= slack && Math.abs(up - p) <= slack);
     boolean share = isShare(estimate.lower(), model) || isShare(estimate.upper(), model);
     return (plain || share) && !saysInterval(estimate, model);
   }

@@ -15,6 +15,7 @@ import weighhouse.rules.check.ratio.Draw;
 import weighhouse.rules.check.ratio.Draws;
 import weighhouse.rules.check.ratio.Estimates;
 import weighhouse.rules.check.ratio.Found;
+import weighhouse.rules.check.ratio.Logarithms;
 import weighhouse.rules.check.ratio.ModelView;
 import weighhouse.rules.check.ratio.Parts;
 import weighhouse.rules.check.ratio.Place;
@@ -40,12 +41,14 @@ public final class NaturalErrorCheck implements Check {
     private final ModelView model;
     private final Rule rule;
     private final Estimates estimates;
+    private final Logarithms logarithms;
     private final Map<CellAddress, Match> matches = new LinkedHashMap<>();
 
     Search(ModelView model, Rule rule) {
       this.model = model;
       this.rule = rule;
       this.estimates = new Estimates(model);
+      this.logarithms = new Logarithms(model);
     }
 
     List<Match> all() {
@@ -65,11 +68,7 @@ public final class NaturalErrorCheck implements Check {
     /** Its mean is a logarithm, or it is log-normal and not one mistake already. */
     private boolean isOnLogScale(Draw draw, CellAddress host) {
       boolean ratio = Ratios.isRatio(model.quantity(draw.location(), host));
-      boolean log =
-          Ratios.isLog(model.quantity(draw.location(), host))
-              || Trees.contains(
-                  draw.location(), n -> n instanceof Expr.Call c && c.function().equals("LN"));
-      return log || (draw.logNormal() && !ratio);
+      return logarithms.isLog(draw.location(), host) || (draw.logNormal() && !ratio);
     }
 
     /** {@code ratio * EXP(se * z)}. */
