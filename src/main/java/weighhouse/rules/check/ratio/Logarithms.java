@@ -15,7 +15,9 @@ public final class Logarithms {
     this.model = model;
   }
 
-  /** Whether an expression is a logarithm: by what it is called, how it is made or what it equals. */
+  /**
+   * Whether an expression is a logarithm: by what it is called, how it is made or what it equals.
+   */
   public boolean isLog(Expr node, CellAddress host) {
     CellAddress cell = model.cell(node, host);
     return Ratios.isLog(model.quantity(node, host))
