@@ -146,13 +146,15 @@ final class Engine implements Recalculation {
 
   @Override
   public Value evaluate(Expr expression, CellAddress host, Values values) {
-    boolean across = model.layout().across(host.sheet());
-    Program program;
     try {
-      program = Compiler.compile(expression, host, false, across, model.names());
+      boolean across = model.layout().across(host.sheet());
+      return run(Compiler.compile(expression, host, false, across, model.names()), host, values);
     } catch (UnsupportedFormulaException e) {
       return Fault.NAME.value();
     }
+  }
+
+  private Value run(Program program, CellAddress host, Values values) {
     if (!(values instanceof CalculatedValues calculated)) {
       throw new IllegalArgumentException("values of another calculation");
     }
