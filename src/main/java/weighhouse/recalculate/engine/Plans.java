@@ -13,6 +13,7 @@ import weighhouse.recalculate.order.Plan;
 import weighhouse.recalculate.order.Unit;
 import weighhouse.recalculate.program.Compiler;
 import weighhouse.recalculate.program.Program;
+import weighhouse.recalculate.program.UnsupportedFormulaException;
 import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.CellRange;
 
@@ -21,6 +22,8 @@ import weighhouse.workbook.CellRange;
  * and another begins. The last few are kept, since draws and probes ask for one again and again.
  */
 final class Plans {
+  private static final String NAME_ERROR = "#NAME?";
+
   private static final int KEPT = 16;
   private static final int REPLACEMENT = -1;
 
@@ -139,9 +142,19 @@ final class Plans {
     Shape shape = model.shapes().at(range.first());
     boolean array = shape != null && shape.array();
     boolean across = model.layout().across(range.sheet());
-    Program program = Compiler.compile(tree, range.first(), array, across, model.names());
+    Program program = program(tree, range.first(), array, across);
     boolean whole =
         range.size() > 1 && model.workbook().sheet(range.sheet()).arrays().contains(range);
     return new Unit(REPLACEMENT, program, range, whole, model.layout());
+  }
+
+  /** A formula that cannot be run shows as one with an unknown name. */
+  private Program program(Expr tree, CellAddress host, boolean array, boolean across) {
+    try {
+      return Compiler.compile(tree, host, array, across, model.names());
+    } catch (UnsupportedFormulaException e) {
+      Expr unknown = new Expr.ErrorLiteral(NAME_ERROR);
+      return Compiler.compile(unknown, host, array, across, model.names());
+    }
   }
 }
