@@ -7,6 +7,8 @@ import weighhouse.quantity.TimeUnit;
 
 /** Arithmetic on lengths of time. */
 public final class Spans {
+  private static final List<Double> CONVERSIONS = List.of(12.0, 52.0, 365.0, 365.25, 365.25 / 7, 30.4375);
+
   private static final double CLOSE = 0.004;
   private static final List<Double> PER_YEAR =
       List.of(12.0, 52.0, 365.0, 365.25, 4.0, 2.0, 24.0, 26.0, 13.0, 52.18, 52.1429);
@@ -24,9 +26,18 @@ public final class Spans {
     if (span == null || !(factor > 0) || Double.isInfinite(factor)) {
       return null;
     }
+    if (span.unit() == TimeUnit.CYCLE && isConversion(factor)) {
+      return span; // the cycle's length was given in another unit than the rate's
+    }
     return span.unit() == TimeUnit.CYCLE
         ? new Span(span.amount() * factor, TimeUnit.CYCLE, span.people())
         : inPlainUnit(span.years() * factor, span.people());
+  }
+
+  /** Months, weeks or days of a year. */
+  private static boolean isConversion(double factor) {
+    double whole = factor < 1 ? 1 / factor : factor;
+    return CONVERSIONS.stream().anyMatch(c -> Math.abs(c - whole) < 1e-6 * c);
   }
 
   private static Span inPlainUnit(double years, double people) {

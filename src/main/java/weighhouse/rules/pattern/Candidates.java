@@ -3,6 +3,8 @@ package weighhouse.rules.pattern;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 import weighhouse.formula.Expr;
 import weighhouse.quantity.Quantity;
 import weighhouse.quantity.Role;
@@ -23,7 +25,9 @@ final class Candidates {
       joined(metavariable, bounds);
     }
     List<Term> terms = new ArrayList<>();
+    Set<Term> grouped = groupedTerms(bounds);
     view.readTerms().forEach(terms::add);
+    terms.removeIf(grouped::contains);
     terms.sort(
         Comparator.comparing((Term term) -> term.operation() == Operation.PRODUCT)
             .thenComparing(term -> !view.spells(term))
@@ -36,6 +40,14 @@ final class Candidates {
       }
     }
     return bounds;
+  }
+
+  /** Factors that stand for the metavariable together: one of them alone would be half of it. */
+  private Set<Term> groupedTerms(List<Bound> groups) {
+    return groups.stream()
+        .flatMap(group -> group.factors().stream())
+        .map(factor -> view.term(factor.node()))
+        .collect(Collectors.toSet());
   }
 
   private Bound bound(Metavariable metavariable, Term term) {
