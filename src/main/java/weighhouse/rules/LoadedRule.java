@@ -24,16 +24,7 @@ record LoadedRule(Rule rule, RuleFile file) {
 
   /** The rule with the severity of one of its patterns. */
   Rule withLevelOf(TypedPattern pattern) {
-    return pattern.level() == null
-        ? rule
-        : new Rule(
-            rule.id(),
-            rule.family(),
-            rule.title(),
-            pattern.level(),
-            rule.explain(),
-            rule.ask(),
-            rule.sources());
+    return pattern.level() == null ? rule : rule.at(pattern.level());
   }
 
   boolean yieldsTo(LoadedRule other) {

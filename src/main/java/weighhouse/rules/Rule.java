@@ -24,4 +24,9 @@ public record Rule(
 
   /** A source by its key in {@code rules/sources.yaml}; {@code at} may be null. */
   public record Citation(String key, String at) {}
+
+  /** The same rule at another severity. */
+  public Rule at(String otherLevel) {
+    return new Rule(id, family, title, otherLevel, explain, ask, sources);
+  }
 }

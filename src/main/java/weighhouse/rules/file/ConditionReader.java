@@ -45,8 +45,8 @@ final class ConditionReader {
     if (fields.has("includes")) {
       conditions.add(new IncludesCondition(Kinds.read(fields, "includes", faults)));
     }
-    if ("true".equals(fields.optional("fixed"))) {
-      conditions.add(new FixedCondition());
+    if (fields.has("fixed")) {
+      conditions.add(new FixedCondition("true".equals(fields.optional("fixed"))));
     }
     if ("true".equals(fields.optional("plain"))) {
       conditions.add(new PlainCondition());

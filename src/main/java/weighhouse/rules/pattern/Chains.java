@@ -8,14 +8,14 @@ import weighhouse.formula.Trees;
 import weighhouse.formula.UnaryOp;
 
 /** Products and sums as written, however their operands are grouped. */
-final class Chains {
+public final class Chains {
   private Chains() {}
 
   /** One operand of a sum as written; a negative one is subtracted. */
-  record Addend(Expr node, boolean negative) {}
+  public record Addend(Expr node, boolean negative) {}
 
   /** The factors of a product from left to right; of anything else, the node alone. */
-  static List<Factor> factors(Expr node) {
+  public static List<Factor> factors(Expr node) {
     List<Factor> factors = new ArrayList<>();
     collect(node, false, factors);
     return factors;
@@ -37,7 +37,7 @@ final class Chains {
   }
 
   /** Whether the node multiplies or divides. */
-  static boolean isProduct(Expr node) {
+  public static boolean isProduct(Expr node) {
     if (node instanceof Expr.Binary binary) {
       return binary.op() == BinaryOp.MULTIPLY || binary.op() == BinaryOp.DIVIDE;
     }
@@ -53,7 +53,7 @@ final class Chains {
   }
 
   /** The addends of a sum from left to right; of anything else, the node alone. */
-  static List<Addend> addends(Expr node) {
+  public static List<Addend> addends(Expr node) {
     List<Addend> addends = new ArrayList<>();
     collectAddends(node, false, addends);
     return addends;
@@ -75,7 +75,7 @@ final class Chains {
   }
 
   /** Whether the node adds or subtracts. */
-  static boolean isSum(Expr node) {
+  public static boolean isSum(Expr node) {
     Expr inside = Trees.inside(node);
     return inside instanceof Expr.Binary binary
         && (binary.op() == BinaryOp.ADD || binary.op() == BinaryOp.SUBTRACT);

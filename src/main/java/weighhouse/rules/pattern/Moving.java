@@ -8,7 +8,7 @@ import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.Workbook;
 
 /** Rewrites an expression of one cell so that it means the same in another. */
-final class Moving {
+public final class Moving {
   private final Workbook workbook;
   private final CellAddress from;
   private final CellAddress to;
@@ -19,7 +19,8 @@ final class Moving {
     this.to = to;
   }
 
-  static Expr move(Expr expression, CellAddress from, CellAddress to, Workbook workbook) {
+  /** The expression of the cell {@code from} as it has to be written in the cell {@code to}. */
+  public static Expr move(Expr expression, CellAddress from, CellAddress to, Workbook workbook) {
     return from.equals(to)
         ? expression
         : Trees.map(expression, new Moving(workbook, from, to)::moved);
