@@ -179,6 +179,15 @@ public final class Survey {
         new Axis(cell.column(), true));
   }
 
+  /** A reference to one cell that slides along when the formula of the host is filled. */
+  public Expr relative(CellAddress cell, CellAddress host) {
+    String sheet = subject.workbook().sheet(cell.sheet()).name();
+    return new Expr.CellRef(
+        cell.sheet() == host.sheet() ? null : new SheetRef(null, sheet, null),
+        new Axis(cell.row() - host.row(), false),
+        new Axis(cell.column() - host.column(), false));
+  }
+
   /** A match on a whole range without operands. */
   public static Match match(
       Rule rule, CellRange range, Expr offending, Expr suggestion, String... notes) {

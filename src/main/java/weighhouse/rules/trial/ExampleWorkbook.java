@@ -25,6 +25,8 @@ import weighhouse.workbook.Workbook;
  * @param tested the cells with the formula under test
  */
 record ExampleWorkbook(Workbook workbook, Declarations declarations, CellRange tested) {
+  /** What stands between a formula and the result that the file holds for it. */
+  private static final String STORED = " stored ";
 
   static ExampleWorkbook of(Example example) {
     Filler filler = new Filler();
@@ -72,7 +74,11 @@ record ExampleWorkbook(Workbook workbook, Declarations declarations, CellRange t
 
     private void put(String content, CellRange range, int row, int column) {
       if (content.startsWith("=")) {
-        cells.formula(moved(content, range, row, column));
+        String[] parts = content.split(STORED, 2);
+        cells.formula(moved(parts[0], range, row, column));
+        if (parts.length > 1) {
+          cells.number(Double.parseDouble(parts[1]));
+        }
       } else if (content.startsWith("'")) {
         cells.text(content.substring(1));
       } else {

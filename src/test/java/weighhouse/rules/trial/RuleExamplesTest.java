@@ -9,13 +9,13 @@ import org.junit.jupiter.api.TestFactory;
 import weighhouse.formula.ShapeIndex;
 import weighhouse.formula.Shapes;
 import weighhouse.quantity.Declarations;
+import weighhouse.recalculate.engine.Recalculations;
 import weighhouse.rules.Check;
 import weighhouse.rules.Rule;
 import weighhouse.rules.RuleBook;
 import weighhouse.rules.Subject;
 import weighhouse.rules.file.Example;
 import weighhouse.rules.file.RuleFile;
-import weighhouse.rules.pattern.ModelScope;
 import weighhouse.workbook.Workbook;
 
 /** Every example of every shipped rule file is a test. */
@@ -41,8 +41,7 @@ class RuleExamplesTest {
   private static Subject plain(Workbook workbook, Declarations declarations) {
     Shapes shapes = ShapeIndex.of(workbook);
     PlainQuantities quantities = new PlainQuantities(workbook, shapes, declarations);
-    ModelScope cells = new ModelScope(workbook, shapes, quantities);
     return new Subject(
-        workbook, shapes, quantities, new PlainRecalculation(workbook, shapes, cells));
+        workbook, shapes, quantities, Recalculations.compile(workbook, shapes));
   }
 }

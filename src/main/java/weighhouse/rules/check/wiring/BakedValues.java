@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import weighhouse.formula.Axis;
 import weighhouse.formula.BinaryOp;
 import weighhouse.formula.Expr;
 import weighhouse.quantity.Kind;
@@ -12,6 +11,7 @@ import weighhouse.rules.Check;
 import weighhouse.rules.Match;
 import weighhouse.rules.Rule;
 import weighhouse.rules.Subject;
+import weighhouse.rules.check.Line;
 import weighhouse.rules.check.Measures;
 import weighhouse.rules.check.Survey;
 import weighhouse.workbook.CellAddress;
@@ -48,6 +48,7 @@ public final class BakedValues implements Check {
     return matches;
   }
 
+  @SuppressWarnings("ArrayRecordComponent") // compared nowhere
   private record Series(CellRange range, double[] values) {
     boolean isLike(Series other) {
       return values.length == other.values.length && !range.equals(other.range);
@@ -55,37 +56,11 @@ public final class BakedValues implements Check {
   }
 
   private static List<Series> series(Survey survey) {
-    List<Series> series = new ArrayList<>();
-    for (CellRange range : survey.subject().quantities().ranges()) {
-      boolean probabilities = survey.kind(range.first()) == Kind.PROBABILITY;
-      if (probabilities && series.size() < MOST_SERIES && range.size() <= 10_000) {
-        for (CellRange line : lines(range)) {
-          if (Survey.cells(line).stream().allMatch(survey::isTyped)) {
-            double[] values =
-                Survey.cells(line).stream().mapToDouble(survey.base()::number).toArray();
-            series.add(new Series(line, values));
-          }
-        }
-      }
-    }
-    return series;
-  }
-
-  /** The columns of a range, or its rows where it is wider than high. */
-  private static List<CellRange> lines(CellRange range) {
-    boolean down = range.rows() >= range.columns();
-    List<CellRange> lines = new ArrayList<>();
-    if (Math.max(range.rows(), range.columns()) < FEWEST) {
-      return lines;
-    }
-    for (int i = 0; i < (down ? range.columns() : range.rows()); i++) {
-      int row = range.firstRow() + (down ? 0 : i);
-      int column = range.firstColumn() + (down ? i : 0);
-      int lastRow = down ? range.lastRow() : row;
-      int lastColumn = down ? column : range.lastColumn();
-      lines.add(new CellRange(range.sheet(), row, column, lastRow, lastColumn));
-    }
-    return lines;
+    return Line.of(Kind.PROBABILITY, survey).stream()
+        .filter(line -> Survey.cells(line.cells()).stream().allMatch(survey::isTyped))
+        .limit(MOST_SERIES)
+        .map(line -> new Series(line.cells(), line.values(survey)))
+        .toList();
   }
 
   private static Optional<Match> derived(
@@ -123,12 +98,7 @@ public final class BakedValues implements Check {
       Rule rule, Series baked, Series base, CellAddress ratio, Survey survey) {
     CellAddress host = baked.range.first();
     Expr one = new Expr.Num(1, "1");
-    Expr.CellRef fixed = (Expr.CellRef) survey.fixed(base.range.first(), host);
-    Expr p =
-        new Expr.CellRef(
-            fixed.sheet(),
-            new Axis(base.range.firstRow() - host.row(), false),
-            new Axis(base.range.firstColumn() - host.column(), false));
+    Expr p = survey.relative(base.range.first(), host);
     Expr stay = new Expr.Binary(BinaryOp.SUBTRACT, one, p);
     Expr power = new Expr.Binary(BinaryOp.POWER, stay, survey.fixed(ratio, host));
     Expr linked = new Expr.Binary(BinaryOp.SUBTRACT, one, power);
