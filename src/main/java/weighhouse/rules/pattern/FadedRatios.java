@@ -34,7 +34,7 @@ final class FadedRatios {
 
   /** The quantity told, unless nothing is told and the term is a faded ratio. */
   Quantity orElse(Term term, Quantity told) {
-    if (told.kind() != Kind.UNKNOWN || term.parts().isEmpty() || dependsOnEvents(term)) {
+    if (told.kind() != Kind.UNKNOWN || term.parts().isEmpty() || isAnotherMeasure(term)) {
       return told;
     }
     for (Term part : view.readTerms()) {
@@ -49,10 +49,15 @@ final class FadedRatios {
     return told;
   }
 
-  /** A ratio that depends on the baseline is another measure: odds made into risks, for one. */
-  private boolean dependsOnEvents(Term term) {
+  /**
+   * A ratio that depends on the baseline (odds made into risks) or on a curve (hazards made into
+   * times) is another measure.
+   */
+  private boolean isAnotherMeasure(Term term) {
     for (Term part : view.readTerms()) {
-      if (part.parts().isEmpty() && term.contains(part) && view.isEvent(part)) {
+      boolean telling =
+          view.isEvent(part) || view.quantity(part).kind() == Kind.CURVE_SHAPE;
+      if (part.parts().isEmpty() && term.contains(part) && telling) {
         return true;
       }
     }

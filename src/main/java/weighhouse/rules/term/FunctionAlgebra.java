@@ -35,6 +35,8 @@ final class FunctionAlgebra {
               ? opaque(call, translator)
               : terms.apply(Operation.SELECT, translated(arguments, translator));
       case "LET" -> let(arguments, translator);
+      case "WEIBULL", "WEIBULL.DIST", "EXPONDIST", "EXPON.DIST" ->
+          Distributions.of(call, translator);
       default -> opaque(call, translator);
     };
   }
