@@ -3,6 +3,7 @@ package weighhouse.rules.check.wiring;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import weighhouse.quantity.Basis;
 import weighhouse.quantity.Inferred;
 import weighhouse.quantity.Kind;
 import weighhouse.rules.Check;
@@ -13,7 +14,10 @@ import weighhouse.rules.check.Measures;
 import weighhouse.rules.check.Survey;
 import weighhouse.workbook.CellRange;
 
-/** A cell that is called one thing and used as another. */
+/**
+ * An effect measure, or a declared cell, that is called one thing and used as another. Probabilities
+ * that are called rates are left to the rules on conversions.
+ */
 public final class LabelAgainstUse implements Check {
   @Override
   public String name() {
@@ -29,7 +33,7 @@ public final class LabelAgainstUse implements Check {
     for (CellRange range : subject.quantities().ranges()) {
       Inferred inferred = subject.quantities().inferred(range.first());
       Kind kind = inferred.quantity().kind();
-      boolean looked = Measures.isMeasure(kind) || Measures.isEvent(kind);
+      boolean looked = Measures.isMeasure(kind) || inferred.basis() == Basis.DECLARED;
       if (looked && !inferred.contradictions().isEmpty()) {
         String[] notes = inferred.contradictions().toArray(String[]::new);
         matches.add(Survey.match(rule, range, null, null, notes));
