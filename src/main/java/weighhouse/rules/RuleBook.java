@@ -76,6 +76,6 @@ public final class RuleBook {
     for (LoadedRule rule : rules.values()) {
       matches.addAll(checks.find(rule, subject));
     }
-    return matches;
+    return new Consequences(rules, subject).leaveOut(matches);
   }
 }

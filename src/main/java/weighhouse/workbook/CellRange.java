@@ -16,6 +16,15 @@ public record CellRange(int sheet, int firstRow, int firstColumn, int lastRow, i
         && cell.column() <= lastColumn;
   }
 
+  /** Whether the two have a cell in common. */
+  public boolean overlaps(CellRange other) {
+    return sheet == other.sheet
+        && firstRow <= other.lastRow
+        && other.firstRow <= lastRow
+        && firstColumn <= other.lastColumn
+        && other.firstColumn <= lastColumn;
+  }
+
   public int rows() {
     return lastRow - firstRow + 1;
   }

@@ -14,7 +14,7 @@ import weighhouse.workbook.CellRange;
  * @param down whether it is a column
  */
 public record Line(CellRange cells, boolean down) {
-  private static final int SHORTEST = 3;
+  private static final int SHORTEST = 4;
   private static final int LONGEST = 20_000;
   private static final int MOST_BESIDE = 200;
 
@@ -41,8 +41,7 @@ public record Line(CellRange cells, boolean down) {
       CellAddress first = down ? range.first().offset(0, i) : range.first().offset(i, 0);
       CellAddress last = first.offset(down ? length - 1 : 0, down ? 0 : length - 1);
       CellRange cells =
-          new CellRange(
-              range.sheet(), first.row(), first.column(), last.row(), last.column());
+          new CellRange(range.sheet(), first.row(), first.column(), last.row(), last.column());
       lines.add(new Line(cells, down));
     }
   }

@@ -20,7 +20,8 @@ import weighhouse.rules.pattern.TypedPattern;
  * @param assumes what the correction takes for granted, or null
  * @param check name of the check in place of patterns, or null
  * @param parameters what the check is told
- * @param yieldsTo rules that say the same thing better where both match
+ * @param yieldsTo rules that say the same thing better where both match; of a check, also those
+ *     from whose places its own may follow
  * @param explain why it is a mistake
  * @param ask the question for the author
  * @param sources published sources

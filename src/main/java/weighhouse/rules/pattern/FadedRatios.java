@@ -55,8 +55,7 @@ final class FadedRatios {
    */
   private boolean isAnotherMeasure(Term term) {
     for (Term part : view.readTerms()) {
-      boolean telling =
-          view.isEvent(part) || view.quantity(part).kind() == Kind.CURVE_SHAPE;
+      boolean telling = view.isEvent(part) || view.quantity(part).kind() == Kind.CURVE_SHAPE;
       if (part.parts().isEmpty() && term.contains(part) && telling) {
         return true;
       }

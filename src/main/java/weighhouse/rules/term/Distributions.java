@@ -7,7 +7,9 @@ import weighhouse.formula.Expr;
 final class Distributions {
   private Distributions() {}
 
-  /** {@code 1-EXP(-(x/b)^a)}, the probability of an event by a time, of a Weibull or exponential. */
+  /**
+   * {@code 1-EXP(-(x/b)^a)}, the probability of an event by a time, of a Weibull or exponential.
+   */
   static Term of(Expr.Call call, Translator translator) {
     List<Term> parts = call.arguments().stream().map(translator::of).toList();
     Terms terms = translator.terms();

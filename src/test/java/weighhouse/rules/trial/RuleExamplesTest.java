@@ -3,12 +3,16 @@ package weighhouse.rules.trial;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.util.List;
+import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
 import weighhouse.formula.ShapeIndex;
 import weighhouse.formula.Shapes;
 import weighhouse.quantity.Declarations;
+import weighhouse.quantity.Quantities;
+import weighhouse.quantity.inference.Inference;
+import weighhouse.recalculate.Recalculation;
 import weighhouse.recalculate.engine.Recalculations;
 import weighhouse.rules.Check;
 import weighhouse.rules.Rule;
@@ -20,16 +24,23 @@ import weighhouse.workbook.Workbook;
 
 /** Every example of every shipped rule file is a test. */
 class RuleExamplesTest {
+  /** Rules about labels, whose examples are read as any workbook is. */
+  private static final Set<String> LABELS = Set.of("label-contradicts-use");
+
   private final RuleBook rules = RuleBook.shipped();
 
   @TestFactory
   Stream<DynamicTest> examples() {
-    Trial trial = new Trial(rules, RuleExamplesTest::plain);
+    Trial plain = new Trial(rules, RuleExamplesTest::plain);
+    Trial labelled = new Trial(rules, RuleExamplesTest::labelled);
     return rules.rules().stream()
         .map(Rule::id)
         .map(id -> rules.file(id).orElseThrow())
         .filter(file -> file.check() == null || !file.check().startsWith(Check.PROBE))
-        .flatMap(file -> file.examples().stream().map(example -> test(trial, file, example)));
+        .flatMap(
+            file ->
+                file.examples().stream()
+                    .map(e -> test(LABELS.contains(file.rule()) ? labelled : plain, file, e)));
   }
 
   private static DynamicTest test(Trial trial, RuleFile file, Example example) {
@@ -41,7 +52,14 @@ class RuleExamplesTest {
   private static Subject plain(Workbook workbook, Declarations declarations) {
     Shapes shapes = ShapeIndex.of(workbook);
     PlainQuantities quantities = new PlainQuantities(workbook, shapes, declarations);
-    return new Subject(
-        workbook, shapes, quantities, Recalculations.compile(workbook, shapes));
+    return new Subject(workbook, shapes, quantities, Recalculations.compile(workbook, shapes));
+  }
+
+  private static Subject labelled(Workbook workbook, Declarations declarations) {
+    Shapes shapes = ShapeIndex.of(workbook);
+    Recalculation recalculation = Recalculations.compile(workbook, shapes);
+    Quantities quantities =
+        Inference.infer(workbook, shapes, recalculation.base()::number, declarations);
+    return new Subject(workbook, shapes, quantities, recalculation);
   }
 }

@@ -57,12 +57,14 @@ public final class BelowBackground implements Check {
     }
   }
 
-  private static Match match(
-      Line line, Line table, CellAddress first, Survey survey, Rule rule) {
+  private static Match match(Line line, Line table, CellAddress first, Survey survey, Rule rule) {
     Region region = survey.subject().shapes().regionAt(line.cells().first());
     String note =
-        "Lower than " + survey.subject().workbook().show(table.cells()) + " first in "
-            + survey.subject().workbook().show(first) + ".";
+        "Lower than "
+            + survey.subject().workbook().show(table.cells())
+            + " first in "
+            + survey.subject().workbook().show(first)
+            + ".";
     if (region == null) {
       return Survey.match(rule, line.cells(), null, null, note);
     }

@@ -20,7 +20,9 @@ import weighhouse.rules.check.Measures;
 import weighhouse.rules.check.Survey;
 import weighhouse.workbook.CellAddress;
 
-/** Exits of a state that take more than all of it, now or at the upper limit of an effect measure. */
+/**
+ * Exits of a state that take more than all of it, now or at the upper limit of an effect measure.
+ */
 public final class ExitsAboveOne implements Check {
   private static final double ROUNDING = 1e-9;
 

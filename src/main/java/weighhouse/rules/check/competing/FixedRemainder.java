@@ -80,8 +80,7 @@ public final class FixedRemainder implements Check {
         trace.states().stream().filter(s -> !s.absorbing()).findFirst().orElseThrow();
     CellAddress host = state.cells().first();
     Optional<CellAddress> stay = stay(survey.tree(state.region()), state.down(), host, survey);
-    CellRange cells =
-        stay.map(cell -> regionOrCell(cell, survey)).orElse(state.region().range());
+    CellRange cells = stay.map(cell -> regionOrCell(cell, survey)).orElse(state.region().range());
     return Survey.match(rule, cells, null, null);
   }
 

@@ -120,8 +120,7 @@ final class Matrices {
   }
 
   static CellRange row(CellRange square, int row) {
-    return new CellRange(
-        square.sheet(), row, square.firstColumn(), row, square.lastColumn());
+    return new CellRange(square.sheet(), row, square.firstColumn(), row, square.lastColumn());
   }
 
   static double sum(CellRange range, Values values) {

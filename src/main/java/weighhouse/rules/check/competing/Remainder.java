@@ -27,12 +27,10 @@ record Remainder(Expr node, List<Expr> exits) {
     return found;
   }
 
-  private static void collect(
-      Expr node, CellAddress host, Survey survey, List<Remainder> found) {
+  private static void collect(Expr node, CellAddress host, Survey survey, List<Remainder> found) {
     if (Chains.isSum(node)) {
       List<Expr> exits = exits(node, host);
-      boolean known =
-          exits.stream().anyMatch(exit -> survey.kind(exit, host) == Kind.PROBABILITY);
+      boolean known = exits.stream().anyMatch(exit -> survey.kind(exit, host) == Kind.PROBABILITY);
       if (exits.size() > 1 && known) {
         found.add(new Remainder(node, exits));
       }

@@ -68,8 +68,7 @@ public final class ScaledBackground implements Check {
     /** The product with the ratio on what is left of the sum without its background. */
     private Optional<Expr> mended(Expr product, CellAddress host) {
       List<Factor> factors = Chains.factors(product);
-      Factor ratio =
-          factors.stream().filter(f -> isOfDisease(f, host)).findFirst().orElse(null);
+      Factor ratio = factors.stream().filter(f -> isOfDisease(f, host)).findFirst().orElse(null);
       for (Factor factor : ratio == null ? List.<Factor>of() : factors) {
         List<Chains.Addend> addends = addends(factor.node(), host);
         List<Chains.Addend> background =
@@ -98,17 +97,12 @@ public final class ScaledBackground implements Check {
               : Moving.move(shape.tree(), cell.get(), host, survey.subject().workbook());
       List<Chains.Addend> addends = Chains.addends(sum);
       boolean rates =
-          addends.stream()
-              .allMatch(a -> !a.negative() && survey.kind(a.node(), host) == Kind.RATE);
+          addends.stream().allMatch(a -> !a.negative() && survey.kind(a.node(), host) == Kind.RATE);
       return rates ? addends : List.of();
     }
 
     private boolean isBackground(Expr addend, CellAddress host) {
-      return survey
-          .cell(addend, host)
-          .map(captions::of)
-          .filter(BackgroundWords::areIn)
-          .isPresent();
+      return survey.cell(addend, host).map(captions::of).filter(BackgroundWords::areIn).isPresent();
     }
 
     @SuppressWarnings("ReferenceEquality") // one very factor
@@ -122,9 +116,7 @@ public final class ScaledBackground implements Check {
       for (Chains.Addend addend : addends) {
         if (addend != background) {
           excess =
-              excess == null
-                  ? addend.node()
-                  : new Expr.Binary(BinaryOp.ADD, excess, addend.node());
+              excess == null ? addend.node() : new Expr.Binary(BinaryOp.ADD, excess, addend.node());
         }
       }
       Expr scaled = new Expr.Binary(BinaryOp.MULTIPLY, excess, ratio.node());

@@ -20,7 +20,9 @@ import weighhouse.rules.pattern.Moving;
 import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.CellRange;
 
-/** Exits of one state that were each made a probability of a rate as if the others were not there. */
+/**
+ * Exits of one state that were each made a probability of a rate as if the others were not there.
+ */
 public final class SeparateConversion implements Check {
   @Override
   public String name() {
@@ -54,8 +56,7 @@ public final class SeparateConversion implements Check {
       Conversion exit, List<Conversion> exits, boolean all, Rule rule, Survey survey) {
     Region region = survey.subject().shapes().regionAt(exit.host());
     Expr share = all ? share(exit, exits, survey) : null;
-    Expr suggestion =
-        share == null ? null : Trees.replace(survey.tree(region), exit.node(), share);
+    Expr suggestion = share == null ? null : Trees.replace(survey.tree(region), exit.node(), share);
     return Survey.match(rule, region.range(), exit.node(), suggestion);
   }
 

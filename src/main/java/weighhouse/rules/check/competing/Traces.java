@@ -74,8 +74,7 @@ final class Traces {
     Map<Span, List<State>> bySpan = new LinkedHashMap<>();
     for (Region region : survey.regions()) {
       for (State state : states(region, survey)) {
-        Span span =
-            new Span(state.cells().sheet(), state.down(), state.start(), state.cycles());
+        Span span = new Span(state.cells().sheet(), state.down(), state.start(), state.cycles());
         bySpan.computeIfAbsent(span, s -> new ArrayList<>()).add(state);
       }
     }
@@ -106,7 +105,10 @@ final class Traces {
     int lines = down ? range.columns() : range.rows();
     boolean tooShort = Math.max(range.rows(), range.columns()) < FEWEST_CYCLES;
     Expr tree = survey.tree(region);
-    if (tooShort || lines > MOST_STATES || survey.shape(region).array() || !readsBefore(tree, down)) {
+    if (tooShort
+        || lines > MOST_STATES
+        || survey.shape(region).array()
+        || !readsBefore(tree, down)) {
       return states;
     }
     Flow flow = Flow.of(tree, down);

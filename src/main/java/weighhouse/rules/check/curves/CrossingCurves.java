@@ -55,9 +55,7 @@ public final class CrossingCurves implements Check {
             .filter(line -> !WITHOUT_EVENT.matcher(line.caption(captions)).find())
             .toList();
     List<Line> same =
-        beside.stream()
-            .filter(line -> arm(OVERALL, line.caption(captions)).equals(arm))
-            .toList();
+        beside.stream().filter(line -> arm(OVERALL, line.caption(captions)).equals(arm)).toList();
     List<Line> fitting = same.isEmpty() ? beside : same;
     return fitting.size() == 1 ? fitting.get(0) : null;
   }

@@ -20,7 +20,9 @@ import weighhouse.rules.Subject;
 import weighhouse.rules.check.Survey;
 import weighhouse.workbook.CellAddress;
 
-/** A hazard ratio in a log-normal, log-logistic or generalised gamma curve, or in a power of one. */
+/**
+ * A hazard ratio in a log-normal, log-logistic or generalised gamma curve, or in a power of one.
+ */
 public final class EffectOnAcceleratedCurve implements Check {
   private static final Set<Kind> RATIOS =
       EnumSet.of(
@@ -45,7 +47,8 @@ public final class EffectOnAcceleratedCurve implements Check {
     for (Region region : survey.regions()) {
       CellAddress host = region.range().first();
       Expr tree = survey.tree(region);
-      boolean effect = survey.measuresIn(tree, host).stream().anyMatch(m -> isRatio(m, host, survey));
+      boolean effect =
+          survey.measuresIn(tree, host).stream().anyMatch(m -> isRatio(m, host, survey));
       if (effect) {
         node(tree, host, survey)
             .ifPresent(node -> matches.add(Survey.match(rule, region.range(), node, null)));

@@ -38,8 +38,7 @@ public final class BlankMeasure implements Check {
             && staysPut(site.factor(), region)
             && isMeasure(cell, survey, captions)
             && !isAsked(survey.tree(region), site.factor())) {
-          matches.add(
-              Survey.match(rule, region.range(), site.factor(), null, note(cell, survey)));
+          matches.add(Survey.match(rule, region.range(), site.factor(), null, note(cell, survey)));
           break;
         }
       }

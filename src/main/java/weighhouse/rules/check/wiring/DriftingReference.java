@@ -19,7 +19,9 @@ import weighhouse.workbook.CellAddress;
 import weighhouse.workbook.CellKind;
 import weighhouse.workbook.CellRange;
 
-/** A relative reference that is at an effect measure where the formula starts, and then slides off. */
+/**
+ * A relative reference that is at an effect measure where the formula starts, and then slides off.
+ */
 public final class DriftingReference implements Check {
   @Override
   public String name() {

@@ -67,8 +67,7 @@ public final class HiddenError implements Check {
     return GUARDS.contains(call.function()) ? call.arguments().get(0) : null;
   }
 
-  private static boolean carriesMeasure(
-      Expr guarded, Expr node, CellAddress host, Survey survey) {
+  private static boolean carriesMeasure(Expr guarded, Expr node, CellAddress host, Survey survey) {
     return Measures.isMeasure(survey.kind(node, host))
         || !survey.measuresIn(guarded, host).isEmpty();
   }

@@ -64,8 +64,7 @@ public final class MissingRatio implements Check {
       CellAddress host = pair.odd().first();
       Expr full = survey.tree(pair.regular());
       Shape odd = survey.subject().shapes().at(host);
-      boolean lacks =
-          odd == null ? pair.between() : lacks(full, measures, odd.tree(), pair);
+      boolean lacks = odd == null ? pair.between() : lacks(full, measures, odd.tree(), pair);
       boolean known = found.stream().anyMatch(match -> match.cells().contains(pair.odd()));
       if (level.isPresent() && lacks && !known) {
         found.add(Survey.match(rule.at(level.get()), pair.odd(), null, full));

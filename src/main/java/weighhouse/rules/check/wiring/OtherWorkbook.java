@@ -40,13 +40,11 @@ public final class OtherWorkbook implements Check {
   private static Optional<Expr> link(Region region, Survey survey, Captions captions) {
     Expr tree = survey.tree(region);
     CellAddress host = region.range().first();
-    Optional<Expr> link =
-        Trees.walk(tree).stream().filter(OtherWorkbook::isElsewhere).findFirst();
+    Optional<Expr> link = Trees.walk(tree).stream().filter(OtherWorkbook::isElsewhere).findFirst();
     if (link.isEmpty()) {
       return link;
     }
-    boolean measure =
-        Measures.isMeasure(survey.kind(host)) || RatioWords.in(captions.of(host));
+    boolean measure = Measures.isMeasure(survey.kind(host)) || RatioWords.in(captions.of(host));
     boolean factor =
         Factors.ofEvents(tree, host, survey).stream()
             .anyMatch(site -> Trees.contains(site.factor(), OtherWorkbook::isElsewhere));

@@ -66,8 +66,7 @@ final class Siblings {
       if (odd != null) {
         boolean between = continues(region, odd, side);
         if (!between || side.forward) {
-          boolean lengthwise =
-              side.vertical == region.range().rows() >= region.range().columns();
+          boolean lengthwise = side.vertical == region.range().rows() >= region.range().columns();
           pairs.add(new Pair(region, odd, between, side.forward, lengthwise));
         }
       }
@@ -93,8 +92,6 @@ final class Siblings {
       return false;
     }
     Region other = survey.subject().shapes().regionAt(beyond);
-    return other != null
-        && other.shape() == region.shape()
-        && side.sameWidth(odd, other.range());
+    return other != null && other.shape() == region.shape() && side.sameWidth(odd, other.range());
   }
 }

@@ -25,8 +25,8 @@ public final class StaleValue implements Check {
   /** Functions about which no two spreadsheets differ: a difference is the file's, not ours. */
   private static final Set<String> PLAIN =
       Set.of(
-          "EXP", "LN", "LOG10", "SQRT", "POWER", "PRODUCT", "SUM", "MIN", "MAX", "ABS", "IF", "ROUND",
-          "AND", "OR", "NOT", "AVERAGE");
+          "EXP", "LN", "LOG10", "SQRT", "POWER", "PRODUCT", "SUM", "MIN", "MAX", "ABS", "IF",
+          "ROUND", "AND", "OR", "NOT", "AVERAGE");
 
   @Override
   public String name() {
@@ -36,8 +36,7 @@ public final class StaleValue implements Check {
   @Override
   public List<Match> find(Subject subject, Rule rule, Map<String, String> parameters) {
     Survey survey = new Survey(subject);
-    List<CellRange> reached =
-        subject.recalculation().dependents(new TreeSet<>(survey.measures()));
+    List<CellRange> reached = subject.recalculation().dependents(new TreeSet<>(survey.measures()));
     Map<Integer, List<Replay.Difference>> byRegion = new LinkedHashMap<>();
     for (Replay.Difference difference : subject.recalculation().replay().differing()) {
       CellAddress cell = difference.cell();

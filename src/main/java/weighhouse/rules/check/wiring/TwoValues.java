@@ -23,9 +23,37 @@ public final class TwoValues implements Check {
   /** Words that many measures share; what tells one from another are the words that remain. */
   private static final Set<String> GENERIC =
       Set.of(
-          "hazard", "rate", "risk", "odds", "ratio", "relative", "mortality", "effect", "hr", "rr",
-          "or", "irr", "smr", "ln", "log", "of", "for", "the", "vs", "versus", "ci", "95", "mean",
-          "base", "case", "value", "estimate", "treatment", "new", "intervention", "reduction");
+          "hazard",
+          "rate",
+          "risk",
+          "odds",
+          "ratio",
+          "relative",
+          "mortality",
+          "effect",
+          "hr",
+          "rr",
+          "or",
+          "irr",
+          "smr",
+          "ln",
+          "log",
+          "of",
+          "for",
+          "the",
+          "vs",
+          "versus",
+          "ci",
+          "95",
+          "mean",
+          "base",
+          "case",
+          "value",
+          "estimate",
+          "treatment",
+          "new",
+          "intervention",
+          "reduction");
 
   @Override
   public String name() {
@@ -87,7 +115,8 @@ public final class TwoValues implements Check {
     for (Region region : survey.regions()) {
       CellAddress host = region.range().first();
       List<CellRange> read = survey.references().ranges(survey.tree(region), host);
-      if (read.stream().anyMatch(r -> r.contains(a)) && read.stream().anyMatch(r -> r.contains(b))) {
+      if (read.stream().anyMatch(r -> r.contains(a))
+          && read.stream().anyMatch(r -> r.contains(b))) {
         return true;
       }
     }

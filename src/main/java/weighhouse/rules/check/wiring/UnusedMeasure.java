@@ -65,8 +65,7 @@ public final class UnusedMeasure implements Check {
 
   private static boolean isIndirect(Shape shape) {
     return Trees.contains(
-        shape.tree(),
-        node -> node instanceof Expr.Call call && call.function().equals("INDIRECT"));
+        shape.tree(), node -> node instanceof Expr.Call call && call.function().equals("INDIRECT"));
   }
 
   /** Evidence that is only listed, and copies of a measure in use, are not meant for use. */
@@ -77,7 +76,17 @@ public final class UnusedMeasure implements Check {
         measures.stream()
             .filter(other -> !unused.contains(other))
             .anyMatch(other -> Math.abs(survey.base().number(other) - value) < 1e-9);
-    return !copy && (measures.size() == 1 || isAmongInputs(cell, survey));
+    return !copy
+        && !isVariant(cell, measures, unused)
+        && (measures.size() == 1 || isAmongInputs(cell, survey));
+  }
+
+  /** A limit, a fixed value or another scenario beside a measure in use. */
+  private static boolean isVariant(
+      CellAddress cell, List<CellAddress> measures, List<CellAddress> unused) {
+    return measures.stream()
+        .filter(other -> other.sheet() == cell.sheet() && other.row() == cell.row())
+        .anyMatch(other -> !unused.contains(other));
   }
 
   private static boolean isAmongInputs(CellAddress cell, Survey survey) {
