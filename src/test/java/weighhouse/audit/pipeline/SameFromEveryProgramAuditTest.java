@@ -15,7 +15,9 @@ import weighhouse.audit.AuditOptions;
 import weighhouse.audit.AuditResult;
 import weighhouse.support.Programs;
 
-/** The same model saved by POI and by LibreOffice, as .xlsx and as .xls, gives the same findings. */
+/**
+ * The same model saved by POI and by LibreOffice, as .xlsx and as .xls, gives the same findings.
+ */
 class SameFromEveryProgramAuditTest {
   private static final Path DEMO = Path.of("demo-workbooks", "cohort-faulty.xlsx");
   private static final Auditor AUDITOR = new Auditor(AuditOptions.DEFAULT);

@@ -14,7 +14,7 @@ import weighhouse.rules.Subject;
 import weighhouse.rules.check.Line;
 import weighhouse.rules.check.Survey;
 
-/** Survival from a common start that is higher at a later time. */
+/** Survival from a common start that is, or with shorter steps would be, higher at a later time. */
 public final class RisingSurvival implements Check {
   private static final double ROUNDING = 1e-7;
 
@@ -33,6 +33,13 @@ public final class RisingSurvival implements Check {
       if (rise > 0 && isCumulative(curve) && !isCopy(line, survey)) {
         String note = "It rises first in " + subject.workbook().show(line.at(rise)) + ".";
         matches.add(Survey.match(rule, line.cells(), null, null, note));
+      }
+    }
+    LateEffect late = new LateEffect(survey);
+    for (Region region : survey.regions()) {
+      boolean known = matches.stream().anyMatch(m -> m.cells().get(0).overlaps(region.range()));
+      if (!known && late.isIn(survey.tree(region), region.range().first())) {
+        matches.add(Survey.match(rule, region.range(), null, null));
       }
     }
     return matches;
