@@ -5,6 +5,7 @@ import java.util.Set;
 import weighhouse.quantity.Kind;
 import weighhouse.quantity.Quantity;
 import weighhouse.rules.term.Identity;
+import weighhouse.rules.term.Operation;
 import weighhouse.rules.term.Sample;
 import weighhouse.rules.term.Term;
 
@@ -34,6 +35,9 @@ final class FadedRatios {
 
   /** The quantity told, unless nothing is told and the term is a faded ratio. */
   Quantity orElse(Term term, Quantity told) {
+    if (RATIOS.contains(told.kind()) && isStretch(term)) {
+      return Quantity.of(Kind.TIME_RATIO);
+    }
     if (told.kind() != Kind.UNKNOWN || term.parts().isEmpty() || isAnotherMeasure(term)) {
       return told;
     }
@@ -47,6 +51,20 @@ final class FadedRatios {
       }
     }
     return told;
+  }
+
+  /** A ratio of hazards to a power of a curve's shape stretches time. */
+  private boolean isStretch(Term term) {
+    if (term.operation() != Operation.POWER) {
+      return false;
+    }
+    Term exponent = term.parts().get(1);
+    for (Term part : view.readTerms()) {
+      if (exponent.contains(part) && view.quantity(part).kind() == Kind.CURVE_SHAPE) {
+        return true;
+      }
+    }
+    return false;
   }
 
   /**

@@ -10,6 +10,7 @@ import weighhouse.formula.Shape;
 import weighhouse.formula.Trees;
 import weighhouse.quantity.Kind;
 import weighhouse.recalculate.Change;
+import weighhouse.recalculate.Replay;
 import weighhouse.recalculate.Value;
 import weighhouse.recalculate.Values;
 import weighhouse.rules.Check;
@@ -105,8 +106,13 @@ public final class UnusedMeasure implements Check {
     private final Survey survey;
     private final List<CellAddress> switches;
 
+    /** What could not be run keeps its value whatever the measure is. */
+    private final boolean everythingRan;
+
     Model(Survey survey) {
       this.survey = survey;
+      Replay replay = survey.subject().recalculation().replay();
+      this.everythingRan = replay.unsupported().isEmpty() && replay.differing().isEmpty();
       this.switches =
           survey.subject().quantities().ranges().stream()
               .filter(range -> survey.kind(range.first()) == Kind.SWITCH)
@@ -125,7 +131,8 @@ public final class UnusedMeasure implements Check {
       if (dependents.isEmpty()) {
         return false;
       }
-      return moves(measure, Map.of(), dependents)
+      return !everythingRan
+          || moves(measure, Map.of(), dependents)
           || switches.stream().anyMatch(cell -> movesUnder(measure, cell, dependents));
     }
 
