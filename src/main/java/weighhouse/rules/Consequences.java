@@ -9,8 +9,8 @@ import weighhouse.workbook.CellRange;
 /**
  * Leaves out what another match says better where checks are among them, of which the patterns know
  * nothing: what a check found on cells that follow from the place of a rule that it yields to (a
- * curve that rises because of a formula before it is not the root), and what a pattern found in cells
- * of which a check has more to say.
+ * curve that rises because of a formula before it is not the root), and what a pattern found in
+ * cells of which a check has more to say.
  */
 final class Consequences {
   private final Map<String, LoadedRule> rules;

@@ -64,7 +64,8 @@ public final class Auditor {
     Ledger ledger = new Ledger(subject, subject.recalculation().base());
     List<Observation> observations = new Observer(subject).observe(ledger.entries());
     List<Suspect> read = new Grouping(subject).group(rules.match(subject));
-    List<Suspect> suspects = new Witnesses(subject, rules).join(read, observations);
+    List<Suspect> suspects =
+        Yielding.settle(new Witnesses(subject, rules).join(read, observations), rules);
 
     List<Outcome> outcomes = Declared.outcomes(subject, brief);
     double threshold = Declared.threshold(subject, brief);

@@ -87,10 +87,12 @@ public final class Algebra {
         && binary.left() instanceof Expr.CellRef l
         && binary.right() instanceof Expr.CellRef r) {
       boolean sameMoment = l.row().equals(r.row()) != l.column().equals(r.column());
-      // time runs down or across; two curves at one moment share the host's own row or column
-      boolean besideHost = l.row().equals(r.row()) ? l.row().value() == 0 : l.column().value() == 0;
-      boolean acrossCurves = sameMoment && besideHost;
-      return Term.of(acrossCurves ? Kind.OCCUPANCY : Kind.PROBABILITY);
+      boolean across = sameMoment && l.row().equals(r.row()) && l.row().value() == 0;
+      boolean down = sameMoment && l.column().equals(r.column()) && l.column().value() == 0;
+      if (down) {
+        return Term.UNKNOWN; // two curves, or one before and after: its label has to tell
+      }
+      return Term.of(across ? Kind.OCCUPANCY : Kind.PROBABILITY);
     }
     return Sums.subtract(a, b);
   }

@@ -7,7 +7,8 @@ import weighhouse.quantity.TimeUnit;
 
 /** Arithmetic on lengths of time. */
 public final class Spans {
-  private static final List<Double> CONVERSIONS = List.of(12.0, 52.0, 365.0, 365.25, 365.25 / 7, 30.4375);
+  private static final List<Double> CONVERSIONS =
+      List.of(12.0, 52.0, 365.0, 365.25, 365.25 / 7, 30.4375);
 
   private static final double CLOSE = 0.004;
   private static final List<Double> PER_YEAR =

@@ -60,8 +60,11 @@ final class Traces {
 
   /** The shortest group of neighbours from this unit on that makes a trace; empty if none does. */
   private List<Unit> window(Unit first, Lines lines) {
-    List<Unit> window = new ArrayList<>(List.of(first));
     boolean carried = carriesOn(first, lines);
+    if (!carried && !isRest(first)) {
+      return List.of(); // probabilities that change with time stand before the states
+    }
+    List<Unit> window = new ArrayList<>(List.of(first));
     for (int k = 1; k < MOST_STATES; k++) {
       Unit next = units.at(lines.beside(first.host(), k));
       if (next == null || !isCandidate(next, lines) || !aligned(first, next, lines)) {
@@ -90,6 +93,11 @@ final class Traces {
     List<Expr> nodes = Trees.walk(unit.tree);
     boolean before = nodes.stream().anyMatch(node -> isBefore(node, lines));
     return before && nodes.stream().anyMatch(Traces::multiplies);
+  }
+
+  /** Whether the formula is what others leave: {@code 1-SUM(...)}. */
+  private static boolean isRest(Unit unit) {
+    return Trees.inside(unit.tree) instanceof Expr.Binary b && b.op() == BinaryOp.SUBTRACT;
   }
 
   private static boolean multiplies(Expr node) {

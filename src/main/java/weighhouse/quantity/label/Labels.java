@@ -59,8 +59,12 @@ public final class Labels {
     Candidate best = null;
     boolean parameter = false;
     boolean thing = isThing(labels);
+    boolean described = isDescribed(labels);
     for (Label label : labels) {
       parameter |= isParameter(label, labels);
+      if (described && isCode(label)) {
+        continue;
+      }
       int bonus = thing && label.place() == Place.ABOVE ? 0 : MEASURE;
       for (Sense sense : label.reading().senses()) {
         Candidate candidate = candidate(label, sense, number, bonus);
@@ -75,6 +79,19 @@ public final class Labels {
       return new Guess(quantity, Strength.WEAK, parameter, List.of());
     }
     return new Guess(quantity, best.strength(), false, evidence(best, labels));
+  }
+
+  /** Whether words on the right say what a code on the left only abbreviates. */
+  private static boolean isDescribed(List<Label> labels) {
+    return labels.stream()
+        .filter(label -> label.place() == Place.RIGHT || label.place() == Place.DESCRIPTION)
+        .anyMatch(label -> !isCode(label) && !label.reading().senses().isEmpty());
+  }
+
+  /** A text like {@code p2_base}, beside the number. */
+  private static boolean isCode(Label label) {
+    String text = label.text().strip();
+    return label.place() == Place.LEFT && text.indexOf(' ') < 0 && text.indexOf('_') > 0;
   }
 
   /** Whether the row's own label names a thing of the model that is no risk. */
