@@ -52,7 +52,7 @@ final class Sheets {
     return this;
   }
 
-  private TreeMap<CellAddress, String> here() {
+  private Map<CellAddress, String> here() {
     return cells.get(cells.size() - 1);
   }
 
@@ -100,7 +100,7 @@ final class Sheets {
     return new Workbook("test.xlsx", "", sheets, names, false, List.of(), List.of(), List.of());
   }
 
-  private static CellStore store(TreeMap<CellAddress, String> cells) {
+  private static CellStore store(Map<CellAddress, String> cells) {
     CellsBuilder builder = new CellsBuilder();
     cells.forEach(
         (cell, content) -> {
@@ -113,7 +113,7 @@ final class Sheets {
 
   private static void put(CellsBuilder builder, String content) {
     if (content.startsWith("=")) {
-      String[] parts = content.substring(1).split("->");
+      String[] parts = content.substring(1).split("->", 2);
       builder.formula(parts[0].strip());
       if (parts.length > 1) {
         builder.number(Double.parseDouble(parts[1].strip()));
