@@ -18,7 +18,7 @@ import weighhouse.workbook.CellAddress;
 final class ComparedArms {
   private static final Pattern VERSUS =
       Pattern.compile(
-          "(.+?)\\b(?:versus|vs\\.?|compared (?:with|to)|gegen|contra|frente a)\\s+(.+)",
+          "(.+?)\\b(?:versus|vs\\.?|compared (?:with|to)|gegen|gegenüber|contra|frente a|contre|par rapport à|comparado con|im vergleich zu)\\s+(.+)",
           Pattern.CASE_INSENSITIVE);
 
   /** The one rule to which the direction of a comparison matters. */
@@ -48,7 +48,7 @@ final class ComparedArms {
     if (!versus.matches()) {
       return false;
     }
-    String second = versus.group(2).split("[,;(]", 2)[0].strip();
+    String second = versus.group(2).split("[,;:(]", 2)[0].strip();
     return !second.isEmpty() && arm.contains(second) && !namesFirst(versus.group(1), arm);
   }
 

@@ -89,10 +89,8 @@ public final class Algebra {
       boolean sameMoment = l.row().equals(r.row()) != l.column().equals(r.column());
       boolean across = sameMoment && l.row().equals(r.row()) && l.row().value() == 0;
       boolean down = sameMoment && l.column().equals(r.column()) && l.column().value() == 0;
-      if (down) {
-        return Term.UNKNOWN; // two curves, or one before and after: its label has to tell
-      }
-      return Term.of(across ? Kind.OCCUPANCY : Kind.PROBABILITY);
+      // beside the host: two curves, or one curve before and after: its label has to tell
+      return across || down ? Term.UNKNOWN : Term.of(Kind.PROBABILITY);
     }
     return Sums.subtract(a, b);
   }

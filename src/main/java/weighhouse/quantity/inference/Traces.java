@@ -95,9 +95,15 @@ final class Traces {
     return before && nodes.stream().anyMatch(Traces::multiplies);
   }
 
-  /** Whether the formula is what others leave: {@code 1-SUM(...)}. */
+  /** Whether the formula is what others leave, {@code 1-SUM(...)} or {@code 1-a-b}, and no more. */
   private static boolean isRest(Unit unit) {
-    return Trees.inside(unit.tree) instanceof Expr.Binary b && b.op() == BinaryOp.SUBTRACT;
+    return Trees.inside(unit.tree) instanceof Expr.Binary b
+        && b.op() == BinaryOp.SUBTRACT
+        && !Trees.contains(unit.tree, Traces::isProductOrPower);
+  }
+
+  private static boolean isProductOrPower(Expr node) {
+    return node instanceof Expr.Binary b && b.op().binding() > BinaryOp.SUBTRACT.binding();
   }
 
   private static boolean multiplies(Expr node) {
