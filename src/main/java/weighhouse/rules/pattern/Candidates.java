@@ -27,7 +27,7 @@ final class Candidates {
     List<Term> terms = new ArrayList<>();
     Set<Term> grouped = groupedTerms(bounds);
     view.readTerms().forEach(terms::add);
-    terms.removeIf(grouped::contains);
+    terms.removeIf(term -> !term.isNumber() && grouped.contains(term));
     terms.sort(
         Comparator.comparing((Term term) -> term.operation() == Operation.PRODUCT)
             .thenComparing(term -> !view.spells(term))
