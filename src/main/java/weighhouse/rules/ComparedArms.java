@@ -54,7 +54,7 @@ final class ComparedArms {
 
   /** Whether the label's last words name the arm before "versus". */
   private static boolean namesFirst(String before, String arm) {
-    String[] words = before.strip().split("\\s+");
+    String[] words = before.strip().split("\\s+", -1);
     String last = words[words.length - 1];
     String pair = words.length > 1 ? words[words.length - 2] + " " + last : last;
     return arm.endsWith(pair);
