@@ -59,8 +59,8 @@ public final class BlankMeasure implements Check {
   private static boolean staysPut(Expr reference, Region region) {
     return region.range().size() == 1
         || !(Trees.inside(reference) instanceof Expr.CellRef cell)
-        || (cell.row().absolute() || region.range().rows() == 1)
-            && (cell.column().absolute() || region.range().columns() == 1);
+        || ((cell.row().absolute() || region.range().rows() == 1)
+            && (cell.column().absolute() || region.range().columns() == 1));
   }
 
   /** Whether the formula asks itself whether the cell holds something. */

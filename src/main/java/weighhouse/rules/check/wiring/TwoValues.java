@@ -95,7 +95,7 @@ public final class TwoValues implements Check {
   }
 
   private static boolean isTelling(String label) {
-    for (String word : label.split(" ")) {
+    for (String word : label.split(" ", -1)) {
       if (word.length() > 2 && !GENERIC.contains(word)) {
         return true;
       }
