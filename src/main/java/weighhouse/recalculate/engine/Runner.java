@@ -83,14 +83,15 @@ class Runner {
       fill(unit);
       return;
     }
-    if (unit.program().pointing()) {
+    boolean noted = unit.program().pointing() && frame.watcher == null;
+    if (noted) {
       pointed.start(unit, strip, position);
-      frame.watcher = frame.watcher == null ? pointed : frame.watcher;
+      frame.watcher = pointed;
     }
     frame.enter(strip);
     frame.moveTo(position);
     one(unit.program().root(), strip.slot() + position);
-    if (frame.watcher == pointed) {
+    if (noted) {
       frame.watcher = null;
     }
   }
