@@ -29,7 +29,7 @@ class KeptApartCasesTest {
   /** What was reached when the guard was set; raise them with the figures. */
   private static final double RECALL = 0.8;
 
-  private static final double PRECISION = 0.8;
+  private static final double PRECISION = 0.85;
 
   @Test
   void findsSeededFaultsAndLittleElse(@TempDir Path folder) throws Exception {
